@@ -29,3 +29,9 @@ export const daysBetween = (from: string, to: string): number =>
 
 /** The calendar date `days` later (or earlier when negative). */
 export const addDays = (date: string, days: number): string => new Date(Date.parse(`${date}T00:00:00Z`) + days * 86_400_000).toISOString().slice(0, 10);
+
+/** Whether `YYYY-MM-DD` names a day that exists. */
+export function isRealDate(text: string): boolean {
+  const moment = new Date(`${text}T00:00:00Z`);
+  return !Number.isNaN(moment.getTime()) && moment.toISOString().slice(0, 10) === text;
+}

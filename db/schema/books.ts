@@ -7,9 +7,7 @@ import { bins } from "./bins";
 import { pickups } from "./pickups";
 import { yards } from "./prices";
 import { tickets } from "./tickets";
-
-export const PLACES = ["outside", "pile", "bin", "load", "sold", "waste", "variance"] as const;
-export const ACCOUNT_KINDS = ["asset", "liability", "equity", "income", "expense"] as const;
+import { PLACES, ACCOUNT_KINDS } from "../words";
 
 /**
  * One row an outfit: the lock of its books. Every booking takes this row FOR UPDATE first, so the books of one outfit are written one

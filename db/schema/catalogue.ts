@@ -1,20 +1,7 @@
 import { boolean, decimal, foreignKey, index, int, json, mysqlEnum, mysqlTable, primaryKey, text, uniqueIndex, varchar } from "drizzle-orm/mysql-core";
 import { id, weight, word } from "./columns";
 import { outfits } from "./people";
-
-export const FAMILIES = [
-  "copper",
-  "wire",
-  "brass",
-  "aluminum",
-  "steel",
-  "stainless",
-  "lead-zinc",
-  "motors",
-  "electronics",
-  "precious",
-  "other",
-] as const;
+import { FAMILIES } from "../words";
 
 /** A class of metal that a yard prices. Each outfit starts with its own copy of the catalogue and may change it. */
 export const grades = mysqlTable(

@@ -2,9 +2,7 @@ import { sql } from "drizzle-orm";
 import { check, foreignKey, index, int, mysqlEnum, mysqlTable, primaryKey, varchar } from "drizzle-orm/mysql-core";
 import { businessDate, id, instant, minor } from "./columns";
 import { memberships } from "./people";
-import { PAID_FROM } from "./pickups";
-
-export const COST_KINDS = ["fuel", "disposal", "supplies", "repairs", "other"] as const;
+import { PAID_FROM, COST_KINDS } from "../words";
 
 /** Money spent on running the work. */
 export const costs = mysqlTable(

@@ -1,8 +1,6 @@
 import { bigint, boolean, foreignKey, index, int, json, mysqlEnum, mysqlTable, primaryKey, text, uniqueIndex, varchar } from "drizzle-orm/mysql-core";
 import { id, instant, word } from "./columns";
-
-export const ROLES = ["owner", "bookkeeper", "collector", "sorter"] as const;
-export const WEIGHT_UNITS_OF_BOOKS = ["lb", "kg"] as const;
+import { ROLES, WEIGHT_UNITS_OF_BOOKS } from "../words";
 
 /** A person who signs in. Belongs to no outfit by itself: memberships say where they work. */
 export const users = mysqlTable(

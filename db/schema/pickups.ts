@@ -3,10 +3,7 @@ import { check, foreignKey, index, int, mysqlEnum, mysqlTable, primaryKey, uniqu
 import { businessDate, id, instant, minor, weight } from "./columns";
 import { itemKinds } from "./catalogue";
 import { memberships } from "./people";
-
-export const PICKUP_SOURCES = ["curb", "call-out", "drop-off", "bought"] as const;
-export const PICKUP_STATES = ["open", "worked-out", "void"] as const;
-export const PAID_FROM = ["cash", "bank", "card", "own-pocket"] as const;
+import { PICKUP_SOURCES, PICKUP_STATES, PAID_FROM } from "../words";
 
 /** One stop's haul. */
 export const pickups = mysqlTable(

@@ -3,8 +3,7 @@ import { boolean, check, decimal, foreignKey, index, int, mysqlEnum, mysqlTable,
 import { businessDate, id, instant, price } from "./columns";
 import { grades } from "./catalogue";
 import { memberships, outfits } from "./people";
-
-export const PRICE_PERS = ["lb", "kg", "cwt", "short-ton", "long-ton", "tonne", "ozt", "each"] as const;
+import { PRICE_PERS } from "../words";
 
 /** A buyer. */
 export const yards = mysqlTable(

@@ -4,10 +4,8 @@ import { businessDate, id, instant, minor, price, weight } from "./columns";
 import { bins } from "./bins";
 import { grades } from "./catalogue";
 import { memberships } from "./people";
-import { PRICE_PERS, yards } from "./prices";
-
-export const TICKET_STATES = ["draft", "posted", "paid", "void"] as const;
-export const PAYMENT_METHODS = ["cash", "check", "transfer", "card"] as const;
+import { yards } from "./prices";
+import { PRICE_PERS, TICKET_STATES, PAYMENT_METHODS } from "../words";
 
 /** The yard's paper. A draft books nothing; posting books both ledgers. */
 export const tickets = mysqlTable(

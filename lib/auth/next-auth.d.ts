@@ -1,0 +1,18 @@
+import "next-auth";
+import "next-auth/jwt";
+
+declare module "next-auth" {
+  interface User {
+    id: string;
+    sessionVersion: number;
+  }
+  interface Session {
+    user: { id: string; name?: string | null; email?: string | null };
+  }
+}
+
+declare module "next-auth/jwt" {
+  interface JWT {
+    sessionVersion?: number;
+  }
+}

@@ -1,0 +1,57 @@
+import "server-only";
+import { RateLimiterMySQL } from "rate-limiter-flexible";
+import { databasePool } from "@/db/client";
+import { AppError } from "@/lib/http/errors";
+
+type Rule = { name: string; points: number; seconds: number };
+
+/** Failures by e-mail and address: ten, then a quarter of an hour. Another address can still sign in, so nobody locks the owner out. */
+export const SIGN_IN_PAIR: Rule = { name: "sign-in-pair", points: 10, seconds: 900 };
+/** Failures by address over many e-mails. */
+export const SIGN_IN_ADDRESS: Rule = { name: "sign-in-address", points: 60, seconds: 900 };
+/** Failures by e-mail over many addresses: NIST SP 800-63B-4 allows no more than a hundred in a row. */
+export const SIGN_IN_EMAIL: Rule = { name: "sign-in-email", points: 100, seconds: 86_400 };
+export const SIGN_UP: Rule = { name: "sign-up", points: 20, seconds: 3600 };
+export const PUBLIC_READ: Rule = { name: "public", points: 600, seconds: 60 };
+
+const limiters = new Map<string, RateLimiterMySQL>();
+
+function limiter({ name, points, seconds }: Rule): RateLimiterMySQL {
+  const known = limiters.get(name);
+  if (known) return known;
+  const made = new RateLimiterMySQL({
+    // The library speaks the callback interface; its table comes from our own migrations.
+    storeClient: databasePool().pool,
+    storeType: "pool",
+    dbName: databasePool().pool.config.connectionConfig.database ?? "",
+    tableName: "rate_limits",
+    tableCreated: true,
+    keyPrefix: name,
+    points,
+    duration: seconds,
+  });
+  limiters.set(name, made);
+  return made;
+}
+
+const seconds = (milliseconds: number) => Math.max(1, Math.ceil(milliseconds / 1000));
+
+const tooMany = (wait: number) =>
+  new AppError("too-many", `Too many tries. Wait ${wait < 90 ? `${wait} seconds` : `${Math.ceil(wait / 60)} minutes`}, then try again.`, { retryAfter: wait });
+
+/** Refuses when the key has used up its points; does not count this try. */
+export async function requirePoints(rule: Rule, key: string): Promise<void> {
+  const state = await limiter(rule).get(key);
+  if (state && state.consumedPoints >= rule.points) throw tooMany(seconds(state.msBeforeNext));
+}
+
+/** Counts one try and refuses past the limit. */
+export async function takePoint(rule: Rule, key: string): Promise<void> {
+  const state = await limiter(rule).penalty(key);
+  if (state.consumedPoints > rule.points) throw tooMany(seconds(state.msBeforeNext));
+}
+
+/** Forgets the failures of a key, after it proved itself. */
+export async function clearPoints(rule: Rule, key: string): Promise<void> {
+  await limiter(rule).delete(key);
+}
