@@ -125,7 +125,7 @@ CREATE TABLE `item_kind_parts` (
 	`name` varchar(120) NOT NULL,
 	`where_it_sits` text NOT NULL,
 	`looks_like` text NOT NULL,
-	`test` text NOT NULL,
+	`test` text,
 	`grade` varchar(60) character set ascii collate ascii_bin NOT NULL,
 	`alt_grade` varchar(60) character set ascii collate ascii_bin,
 	`leave_as` varchar(60) character set ascii collate ascii_bin,

@@ -79,10 +79,11 @@ export const itemKindParts = mysqlTable(
     position: int("position").notNull(),
     key: word("key", 60).notNull(),
     name: varchar("name", { length: 120 }).notNull(),
-    /** Where it sits, what it looks like, how to tell the metal: the sheet's own sentences. */
+    /** Where it sits and what it looks like: the sheet's own sentences. */
     whereItSits: text("where_it_sits").notNull(),
     looksLike: text("looks_like").notNull(),
-    test: text("test").notNull(),
+    /** How to tell the metal. NULL where looking is enough. */
+    test: text("test"),
     /** Catalogue keys of the usual grade, what it may be instead, and what it counts as when left in. */
     grade: word("grade", 60).notNull(),
     altGrade: word("alt_grade", 60),

@@ -1,6 +1,7 @@
 import "server-only";
 import { RateLimiterMySQL } from "rate-limiter-flexible";
 import { databasePool } from "@/db/client";
+import { env } from "@/lib/env";
 import { AppError } from "@/lib/http/errors";
 
 type Rule = { name: string; points: number; seconds: number };
@@ -23,7 +24,7 @@ function limiter({ name, points, seconds }: Rule): RateLimiterMySQL {
     // The library speaks the callback interface; its table comes from our own migrations.
     storeClient: databasePool().pool,
     storeType: "pool",
-    dbName: databasePool().pool.config.connectionConfig.database ?? "",
+    dbName: new URL(env().DATABASE_URL).pathname.slice(1),
     tableName: "rate_limits",
     tableCreated: true,
     keyPrefix: name,

@@ -80,7 +80,7 @@ function failed(error: unknown, request: NextRequest, requestId: string): Respon
   const facts = { requestId, method: request.method, path: request.nextUrl.pathname, status: problem.status };
   if (problem.status >= 500) log.error({ ...facts, err: known }, "request failed");
   else if (problem.status === 401 || problem.status === 403 || problem.status === 429) log.warn({ ...facts, event: "denied" }, problem.title);
-  const wait = known instanceof AppError && known.retryAfter !== null ? { "retry-after": String(known.retryAfter) } : {};
+  const wait: Record<string, string> = known instanceof AppError && known.retryAfter !== null ? { "retry-after": String(known.retryAfter) } : {};
   return new Response(JSON.stringify(problem), {
     status: problem.status,
     headers: { ...HEADERS, "content-type": "application/problem+json", "x-request-id": requestId, ...wait },
