@@ -23,9 +23,11 @@ export function findProgram(name) {
 }
 
 const started = new Set();
+let closing = false;
 
-/** Starts a program and keeps it in mind, so that an interrupted command leaves nothing running. */
+/** Starts a program and keeps it in mind, so that an interrupted command leaves nothing running. Once stopping began, nothing starts. */
 export function start(program, args, options = {}) {
+  if (closing) throw new Refusal("Stopping.");
   const child = spawn(program, args, { cwd: root, stdio: "inherit", ...options });
   started.add(child);
   child.once("exit", () => started.delete(child));
@@ -82,5 +84,15 @@ export async function stop(child, patience = 10_000) {
   await gone;
 }
 
-/** Stops everything that this command started and that still runs. */
-export const stopAll = () => Promise.all([...started].map((child) => stop(child)));
+/** Stops everything that this command started and that still runs, and lets nothing new start. */
+export function stopAll() {
+  closing = true;
+  return Promise.all([...started].map((child) => stop(child)));
+}
+
+/** Resolves with "asked" at the first signal that asks this command to end. Later ones change nothing: stopping is under way. */
+export function askedToStop() {
+  return new Promise((resolve) => {
+    for (const signal of ["SIGINT", "SIGTERM", "SIGHUP"]) process.on(signal, () => resolve("asked"));
+  });
+}
