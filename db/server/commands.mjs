@@ -56,6 +56,9 @@ export async function databaseDown() {
   const server = findServer(dataFolder());
   if (!server) say("No private database runs from this data folder.");
   else if (!existsSync(server.keepFile)) throw new Refusal("This database belongs to a running app. Stop the app instead (Ctrl-C where it runs).");
-  else await stopServer(server);
+  else {
+    await stopServer(server);
+    say("The private database is stopped.");
+  }
   return 0;
 }
