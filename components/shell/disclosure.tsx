@@ -24,8 +24,7 @@ export function Disclosure({ className, summary, children }: DisclosureProps) {
       box.current.querySelector("summary")?.focus();
     };
     const onPress = (event: PointerEvent) => {
-      if (box.current?.open && event.target instanceof Node && !box.current.contains(event.target))
-        box.current.open = false;
+      if (box.current?.open && event.target instanceof Node && !box.current.contains(event.target)) box.current.open = false;
     };
     document.addEventListener("keydown", onKey);
     document.addEventListener("pointerdown", onPress);

@@ -10,17 +10,10 @@ interface Look {
   children: ReactNode;
 }
 
-type ButtonProps = Look &
-  ({ href: string; type?: undefined } | (ButtonHTMLAttributes<HTMLButtonElement> & { href?: undefined }));
+type ButtonProps = Look & ({ href: string; type?: undefined } | (ButtonHTMLAttributes<HTMLButtonElement> & { href?: undefined }));
 
 function lookOf({ variant = "filled", size = "md", className }: Look): string {
-  return classes(
-    "btn",
-    variant !== "filled" && "line-b",
-    variant === "danger" && "danger",
-    size !== "md" && size,
-    className,
-  );
+  return classes("btn", variant !== "filled" && "line-b", variant === "danger" && "danger", size !== "md" && size, className);
 }
 
 /** A button, or a link that looks like one when it has an `href`. */

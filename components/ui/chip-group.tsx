@@ -41,10 +41,7 @@ export function ChipGroup<Value extends string>(props: ChipGroupProps<Value>) {
   return (
     <fieldset className={classes("form-row", props.className)} aria-describedby={error ? `${id}-error` : undefined}>
       <legend className={hideLegend ? "vh" : undefined}>{legend}</legend>
-      <div
-        className={classes("chips", size === "sm" && "sm")}
-        style={{ "--cols": columns ?? Math.min(options.length, 4) }}
-      >
+      <div className={classes("chips", size === "sm" && "sm")} style={{ "--cols": columns ?? Math.min(options.length, 4) }}>
         {options.map((option, index) => (
           <label key={option.value} className={classes("chip", option.detail !== undefined && "split")}>
             <input

@@ -33,9 +33,7 @@ export function ErrorSummary({ problems, attempt = 0 }: ErrorSummaryProps) {
       <h2 id="problem-title">There is a problem</h2>
       <ul>
         {problems.map((problem) => (
-          <li key={`${problem.field}:${problem.message}`}>
-            {problem.field ? <a href={`#${problem.field}`}>{problem.message}</a> : problem.message}
-          </li>
+          <li key={`${problem.field}:${problem.message}`}>{problem.field ? <a href={`#${problem.field}`}>{problem.message}</a> : problem.message}</li>
         ))}
       </ul>
     </div>

@@ -1,16 +1,5 @@
 /** The catalogue's families of metal, as they stand in a grade's record. */
-export type MetalFamily =
-  | "copper"
-  | "wire"
-  | "brass"
-  | "aluminum"
-  | "steel"
-  | "stainless"
-  | "lead-zinc"
-  | "motors"
-  | "electronics"
-  | "precious"
-  | "other";
+export type MetalFamily = "copper" | "wire" | "brass" | "aluminum" | "steel" | "stainless" | "lead-zinc" | "motors" | "electronics" | "precious" | "other";
 
 /** The hatch a family wears: seven materials, and dots for what is no metal. */
 export type Hatch = "copper" | "wire" | "brass" | "alu" | "lead" | "elec" | "iron" | "waste";

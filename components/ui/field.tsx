@@ -1,10 +1,4 @@
-import type {
-  InputHTMLAttributes,
-  ReactNode,
-  Ref,
-  SelectHTMLAttributes,
-  TextareaHTMLAttributes,
-} from "react";
+import type { InputHTMLAttributes, ReactNode, Ref, SelectHTMLAttributes, TextareaHTMLAttributes } from "react";
 import { classes } from "./classes";
 
 /** What an input needs from its field so that label, hint and error are tied to it. */
@@ -82,11 +76,7 @@ export function TextField({
   className,
   ...input
 }: FieldProps & Own<InputHTMLAttributes<HTMLInputElement>> & { ref?: Ref<HTMLInputElement> }) {
-  return (
-    <Field {...{ id, label, hint, error, unit, optional, className }}>
-      {(control) => <input type="text" {...input} {...control} />}
-    </Field>
-  );
+  return <Field {...{ id, label, hint, error, unit, optional, className }}>{(control) => <input type="text" {...input} {...control} />}</Field>;
 }
 
 /** A longer text in a field. */
@@ -100,11 +90,7 @@ export function TextAreaField({
   className,
   ...area
 }: FieldProps & Own<TextareaHTMLAttributes<HTMLTextAreaElement>> & { ref?: Ref<HTMLTextAreaElement> }) {
-  return (
-    <Field {...{ id, label, hint, error, unit, optional, className }}>
-      {(control) => <textarea rows={3} {...area} {...control} />}
-    </Field>
-  );
+  return <Field {...{ id, label, hint, error, unit, optional, className }}>{(control) => <textarea rows={3} {...area} {...control} />}</Field>;
 }
 
 /** A list to choose one from, where chips would be too many. Children are the options. */
@@ -118,11 +104,7 @@ export function SelectField({
   className,
   ...select
 }: FieldProps & Own<SelectHTMLAttributes<HTMLSelectElement>> & { ref?: Ref<HTMLSelectElement> }) {
-  return (
-    <Field {...{ id, label, hint, error, unit, optional, className }}>
-      {(control) => <select {...select} {...control} />}
-    </Field>
-  );
+  return <Field {...{ id, label, hint, error, unit, optional, className }}>{(control) => <select {...select} {...control} />}</Field>;
 }
 
 /** One box to tick, with its words beside it. */

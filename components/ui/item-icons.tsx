@@ -4,16 +4,10 @@ const box = "M4.5 3.5h23v25h-23z";
 const coil = "M9 13h14M9 17h14M9 21h14";
 
 const byKind: Record<string, ReactNode> = {
-  "upright-vacuum": (
-    <path d="M4 24.5h15.5v4H4zM8.5 24.5 13.5 11l6 2.2-4.2 11.3M16.8 12l3.3-8.5h5M11.3 17l6 2.2" />
-  ),
-  "canister-vacuum": (
-    <path d="M3 19.5h13v7H3zM5.5 26.5v2M13.5 26.5v2M16 21.5h4.5V6.5h5.5V3.5M18 28.5h10M24 28.5 26 6.5" />
-  ),
+  "upright-vacuum": <path d="M4 24.5h15.5v4H4zM8.5 24.5 13.5 11l6 2.2-4.2 11.3M16.8 12l3.3-8.5h5M11.3 17l6 2.2" />,
+  "canister-vacuum": <path d="M3 19.5h13v7H3zM5.5 26.5v2M13.5 26.5v2M16 21.5h4.5V6.5h5.5V3.5M18 28.5h10M24 28.5 26 6.5" />,
   "carpet-cleaner": <path d="M4 23.5h17v5H4zM7 23.5v-6h8l3 6M15 17.5 19.5 5.5h6.5M9 17.5v-5h5.5" />,
-  "microwave-oven": (
-    <path d="M2.5 7.5h27v17h-27zM6 11h14v10H6zM23.5 12h3M23.5 16h3M23.5 20h3M5 24.5V27M27 24.5V27" />
-  ),
+  "microwave-oven": <path d="M2.5 7.5h27v17h-27zM6 11h14v10H6zM23.5 12h3M23.5 16h3M23.5 20h3M5 24.5V27M27 24.5V27" />,
   dishwasher: (
     <>
       <path d={`${box}M4.5 9.5h23M8 6.5h6M23.5 6.5h1M7.5 25h17`} />
@@ -49,9 +43,7 @@ const byKind: Record<string, ReactNode> = {
   "range-hood": <path d="M12 3.5h8v8h-8zM12 11.5 3 20.5v4h26v-4l-9-9M3 20.5h26M13 22.5h6" />,
   "garbage-disposal": <path d="M11 3.5h10v4H11zM9 7.5h14v13l-3 8h-8l-3-8zM9 13.5H5v-5M9 17.5h14" />,
   "water-heater-electric": <path d="M8.5 4.5h15v23h-15zM12 4.5v-3M20 4.5v-3M8.5 10h15M17 13l-3 5h4l-3 5" />,
-  "water-heater-gas": (
-    <path d="M8.5 6.5h15v21h-15zM13.5 6.5v-5h5v5M8.5 11h15M16 15c3 3.5 3.5 5 3.5 6.5a3.5 3.5 0 0 1-7 0c0-1.5 2-2.5 3.5-6.5z" />
-  ),
+  "water-heater-gas": <path d="M8.5 6.5h15v21h-15zM13.5 6.5v-5h5v5M8.5 11h15M16 15c3 3.5 3.5 5 3.5 6.5a3.5 3.5 0 0 1-7 0c0-1.5 2-2.5 3.5-6.5z" />,
   "furnace-blower": (
     <>
       <path d="M25.5 16A9.5 9.5 0 1 1 16 6.5h12.5v7h-3" />
@@ -67,9 +59,7 @@ const byKind: Record<string, ReactNode> = {
     </>
   ),
   "space-heater": <path d="M3.5 8.5h25v15h-25zM7 12.5h18M7 16h18M7 19.5h18M6 23.5v4M26 23.5v4" />,
-  "tube-television": (
-    <path d="M3 9.5h26v17H3zM11 3l5 6 5-6M6.5 12.5h14q1.5 5.5 0 10.5h-14q-1.5-5.5 0-10.5zM24.5 14H26M24.5 18H26" />
-  ),
+  "tube-television": <path d="M3 9.5h26v17H3zM11 3l5 6 5-6M6.5 12.5h14q1.5 5.5 0 10.5h-14q-1.5-5.5 0-10.5zM24.5 14H26M24.5 18H26" />,
   "tube-monitor": <path d="M4 4.5h24v18H4zM7.5 8h17q1 5.5 0 11h-17q-1-5.5 0-11zM12 22.5v3H8.5v3h15v-3H20v-3" />,
   "flat-television": <path d="M2.5 6.5h27v16h-27zM5.5 9.5h21v10h-21zM16 22.5v4M9 27.5h14" />,
   "stereo-receiver": (

@@ -28,10 +28,7 @@ export function LedgerTable({ caption, showCaption = false, rows = "plain", clas
 }
 
 /** How a column is sorted now, and what a press on its head does. */
-export type Sort = { direction: "ascending" | "descending" | "none" } & (
-  | { onSort: () => void; href?: undefined }
-  | { href: string; onSort?: undefined }
-);
+export type Sort = { direction: "ascending" | "descending" | "none" } & ({ onSort: () => void; href?: undefined } | { href: string; onSort?: undefined });
 
 interface ThProps extends Omit<ThHTMLAttributes<HTMLTableCellElement>, "scope"> {
   /** The unit, once, under the head. */

@@ -6,12 +6,7 @@ export function Line({ stations, current }: { stations: Station[]; current?: Sta
   return (
     <nav className="line" aria-label="The line">
       {stations.map((station) => (
-        <Link
-          key={station.key}
-          className="st"
-          href={station.href}
-          aria-current={station.key === current ? "page" : undefined}
-        >
+        <Link key={station.key} className="st" href={station.href} aria-current={station.key === current ? "page" : undefined}>
           <b>{station.name}</b>{" "}
           <span className="fig">
             {station.figure}

@@ -11,12 +11,7 @@ export function Mark({ className }: { className?: string }) {
           <path d="M-1 5 5-1M-1 1 1-1M3 5l2-2" stroke="currentColor" strokeWidth="1" />
         </pattern>
       </defs>
-      <path
-        d="M1 11.5h13.5v6H25v5.5H1z"
-        fill={`url(#${pattern})`}
-        stroke="currentColor"
-        strokeWidth="1.6"
-      />
+      <path d="M1 11.5h13.5v6H25v5.5H1z" fill={`url(#${pattern})`} stroke="currentColor" strokeWidth="1.6" />
       <path d="M3 9.5 4.6 3.6h6.3l1.6 5.9z" fill="currentColor" />
       <path d="M6 3.4V1h3.5v2.4" fill="none" stroke="currentColor" strokeWidth="1.5" />
     </svg>

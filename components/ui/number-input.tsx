@@ -4,8 +4,7 @@ import { useId, useState, type InputHTMLAttributes, type Ref } from "react";
 import { readNumber } from "@/lib/arithmetic/read-number";
 import { Field, type FieldProps } from "./field";
 
-interface NumberInputProps
-  extends FieldProps, Omit<InputHTMLAttributes<HTMLInputElement>, "id" | "className" | "type" | "inputMode"> {
+interface NumberInputProps extends FieldProps, Omit<InputHTMLAttributes<HTMLInputElement>, "id" | "className" | "type" | "inputMode"> {
   ref?: Ref<HTMLInputElement>;
   /** The reader's locale, which settles what a lone comma before three digits means. */
   locale?: string;

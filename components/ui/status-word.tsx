@@ -11,17 +11,5 @@ interface StatusWordProps {
 
 /** A state in one plain word. It is not a button and does not look like one. */
 export function StatusWord({ children, tone = "plain", boxed }: StatusWordProps) {
-  return (
-    <span
-      className={classes(
-        "status",
-        tone === "quiet" && "mut",
-        tone === "act" && "ok",
-        tone === "bad" && "bad",
-        boxed && "boxed",
-      )}
-    >
-      {children}
-    </span>
-  );
+  return <span className={classes("status", tone === "quiet" && "mut", tone === "act" && "ok", tone === "bad" && "bad", boxed && "boxed")}>{children}</span>;
 }

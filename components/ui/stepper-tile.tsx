@@ -39,13 +39,7 @@ export function StepperTile(props: StepperTileProps) {
           {count}
         </span>
       </button>
-      <button
-        type="button"
-        className="mi"
-        aria-label={`One ${name} fewer`}
-        disabled={count === 0}
-        onClick={() => onChange(Math.max(0, count - 1))}
-      >
+      <button type="button" className="mi" aria-label={`One ${name} fewer`} disabled={count === 0} onClick={() => onChange(Math.max(0, count - 1))}>
         −
       </button>
       <button type="button" className="pl" aria-label={`One ${name} more`} disabled={count >= max} onClick={add}>

@@ -18,10 +18,7 @@ type TagProps = TagFace &
     | { as?: "span" }
     | { as: "link"; href: string }
     | ({ as: "button"; pressed: boolean } & Omit<ButtonHTMLAttributes<HTMLButtonElement>, "name" | "className">)
-    | ({ as: "radio"; field: string; ref?: Ref<HTMLInputElement> } & Omit<
-        InputHTMLAttributes<HTMLInputElement>,
-        "name" | "size" | "className" | "type"
-      >)
+    | ({ as: "radio"; field: string; ref?: Ref<HTMLInputElement> } & Omit<InputHTMLAttributes<HTMLInputElement>, "name" | "size" | "className" | "type">)
   );
 
 /** A grade as the tag that hangs on its bin: a label, a link, a pressable choice, or one radio of a group. */

@@ -1,0 +1,9 @@
+/** A share of the width as an SVG or CSS percentage. Chart geometry only: no weight or amount is computed here. */
+export function percent(share: number): string {
+  return `${(share * 100).toFixed(3)}%`;
+}
+
+/** A pixel position, short enough for markup. */
+export function px(value: number): number {
+  return Math.round(value * 100) / 100;
+}
