@@ -23,7 +23,7 @@ import { call, type Answer } from "../api/call";
 import { makeOutfit, type TestOutfit } from "../api/outfit";
 
 const TODAY = new Date().toISOString().slice(0, 10);
-const DAY = `${TODAY.slice(0, 4)}-01-15`;
+const DAY = "2026-01-15";
 
 /** One thing a member does. `pick` chooses among what exists by then; `again` sends the very same request once more. */
 type Step = {
