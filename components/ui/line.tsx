@@ -10,12 +10,7 @@ export function Line({ stations, current }: { stations: Station[]; current?: Sta
           <b>{station.name}</b>{" "}
           <span className="fig">
             {station.figure}
-            {station.unit ? (
-              <>
-                {" "}
-                <span className={station.second ? "u keep" : "u"}>{station.unit}</span>
-              </>
-            ) : null}
+            {station.unit ? <span className={station.second ? "u keep" : "u"}> {station.unit}</span> : null}
             {station.second ? (
               <span className="second">
                 <span className="dot">·</span>

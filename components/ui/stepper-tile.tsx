@@ -29,11 +29,13 @@ export function StepperTile(props: StepperTileProps) {
       {stop ? <i className="stripes" aria-hidden="true" /> : null}
       <button type="button" className="face" onClick={add}>
         <ItemIcon kind={kind} group={group} />
-        <b>
-          <span className="vh">Add one </span>
-          {name}
-        </b>
-        {hazard ? <HazardMark label={`Hazard: ${hazard}`} /> : null}
+        <span className="what">
+          <b>
+            <span className="vh">Add one </span>
+            {name}
+          </b>
+          {hazard ? <HazardMark label={`Hazard: ${hazard}`} /> : null}
+        </span>
         <span className="q">
           <span className="vh">, counted </span>
           {count}

@@ -111,7 +111,7 @@ export function WaterfallBars({ sales, steps, net, summary, caption }: Waterfall
   return (
     <figure className="chart">
       <div className="scroll" role="group" aria-label="Chart" tabIndex={0}>
-        <svg width="100%" height={height} style={{ minWidth: 600 }} role="img" aria-label={summary}>
+        <svg width="100%" height={height} style={{ minWidth: 660 }} role="img" aria-label={summary}>
           <line x1="0" x2="100%" y1={px(zero)} y2={px(zero)} stroke="var(--ink)" />
           <SalesBar blocks={stack(sales.parts)} y={y} base={zero} />
           <text x={percent(barShare / 2)} y={px(y(sales.value) - 8)} className="val">

@@ -69,7 +69,7 @@ export function StepLine({ series, from, to, formatTick, summary }: StepLineProp
   const ends = labelHeights(drawn.map((one) => y(one.points.at(-1)!.value)));
   if (drawn.length === 0) return null;
   return (
-    <div className="chart">
+    <div className="chart scroll" role="group" aria-label="Chart" tabIndex={0}>
       <svg viewBox={`0 0 ${width} ${height}`} width={width} height={height} role="img" aria-label={summary} style={{ maxWidth: "none" }}>
         {y.ticks(4).map((tick) => (
           <g key={tick}>
