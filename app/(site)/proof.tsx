@@ -75,6 +75,7 @@ export function SafetySection() {
       <h2>Hazard first, then the metal</h2>
       <p>A breakdown sheet says where the metal hides and how to test it. What can hurt you comes first, and always looks like this.</p>
       <Caution
+        level={3}
         title="Microwave, before the cover comes off"
         lines={[
           "The capacitor holds a charge after unplugging. It can kill.",

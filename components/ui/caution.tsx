@@ -12,7 +12,7 @@ interface CautionProps {
 }
 
 /** A hazard, stated before the work. It cannot be dismissed, and it never passes for legal advice. */
-export function Caution({ title, lines, level = 3, children }: CautionProps) {
+export function Caution({ title, lines, level = 2, children }: CautionProps) {
   const Heading = level === 2 ? "h2" : "h3";
   return (
     <section className="caution">

@@ -43,6 +43,16 @@ function stack(parts: { family: string; value: number }[]): { hatch: Hatch; valu
     .sort((a, b) => b.value - a.value);
 }
 
+/** The span each block takes on the scale, from the bottom up. */
+function spans(blocks: { hatch: Hatch; value: number }[]): { hatch: Hatch; from: number; to: number }[] {
+  let sum = 0;
+  return blocks.map(({ hatch, value }) => {
+    const from = sum;
+    sum += value;
+    return { hatch, from, to: sum };
+  });
+}
+
 /** Label positions at least 15.5 px apart, in the order of the blocks from the top. */
 function spread(middles: number[]): number[] {
   const placed: number[] = [];
@@ -52,12 +62,8 @@ function spread(middles: number[]): number[] {
 }
 
 function SalesBar({ blocks, y, base }: { blocks: { hatch: Hatch; value: number }[]; y: (value: number) => number; base: number }) {
-  let sum = 0;
-  const drawn = blocks.map((block) => {
-    const bottom = y(sum);
-    sum += block.value;
-    return { hatch: block.hatch, y: y(sum), height: bottom - y(sum) };
-  });
+  const drawn = spans(blocks).map(({ hatch, from, to }) => ({ hatch, y: y(to), height: y(from) - y(to) }));
+  const crest = Math.min(base, ...drawn.map((block) => block.y));
   const fromTop = [...drawn].reverse();
   const labels = spread(fromTop.map((block) => block.y + block.height / 2));
   return (
@@ -65,7 +71,7 @@ function SalesBar({ blocks, y, base }: { blocks: { hatch: Hatch; value: number }
       {drawn.map((block) => (
         <HatchRect key={block.hatch} hatch={block.hatch} x="0" y={px(block.y)} width={percent(barShare)} height={px(block.height)} />
       ))}
-      <rect x="0" y={px(y(sum))} width={percent(barShare)} height={px(base - y(sum))} fill="none" stroke="var(--ink)" strokeWidth="1.2" />
+      <rect x="0" y={px(crest)} width={percent(barShare)} height={px(base - crest)} fill="none" stroke="var(--ink)" strokeWidth="1.2" />
       <svg x={percent(barShare)} overflow="visible">
         {fromTop.map((block, index) => (
           <g key={block.hatch}>
