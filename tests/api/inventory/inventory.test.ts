@@ -29,7 +29,7 @@ function request(route: (typeof routes)[number], key: string | undefined, more: 
     params: rest,
     ...(key === undefined ? {} : { key }),
     ...(route.definition.body ? { body: {} } : {}),
-    headers: route.definition.versioned ? { "if-match": '"1"' } : {},
+    headers: (route.definition.versioned ? { "if-match": "\"1\"" } : {}) as Record<string, string>,
     ...more,
   };
 }
