@@ -38,7 +38,13 @@ const listed = [...new Set(AREAS.map(([from]) => from))].join("|");
 
 module.exports = {
   forbidden: [
-    { name: "no-cycles", comment: "Two files that need each other are one thing, or the wrong two.", severity: "error", from: {}, to: { circular: true, viaOnly: { dependencyTypesNot: ["type-only"] } } },
+    {
+      name: "no-cycles",
+      comment: "Two files that need each other are one thing, or the wrong two.",
+      severity: "error",
+      from: {},
+      to: { circular: true, viaOnly: { dependencyTypesNot: ["type-only"] } },
+    },
     { name: "resolvable", comment: "An import that leads nowhere.", severity: "error", from: {}, to: { couldNotResolve: true, pathNot: "^server-only$" } },
     {
       name: "lib-below-app",

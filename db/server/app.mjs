@@ -11,16 +11,12 @@ const PATIENCE = 60_000;
  * log goes. The app has a session of its own, so that Ctrl-C reaches only the command, which then stops things in order.
  */
 export async function startApp({ mode, port, env, output = "inherit" }) {
-  const child = start(
-    process.execPath,
-    ["--import", "./db/server/leave-with-parent.mjs", nextProgram, mode, "-H", "127.0.0.1", "-p", String(port)],
-    {
-      cwd: root,
-      detached: true,
-      stdio: ["ignore", output, output, "ipc"],
-      env: { ...process.env, ...env, NODE_ENV: mode === "start" ? "production" : "development" },
-    },
-  );
+  const child = start(process.execPath, ["--import", "./db/server/leave-with-parent.mjs", nextProgram, mode, "-H", "127.0.0.1", "-p", String(port)], {
+    cwd: root,
+    detached: true,
+    stdio: ["ignore", output, output, "ipc"],
+    env: { ...process.env, ...env, NODE_ENV: mode === "start" ? "production" : "development" },
+  });
   const until = Date.now() + PATIENCE;
   while (!(await answersAt(port))) {
     if (child.exitCode !== null || child.signalCode !== null) throw new Refusal("The app ended while it was starting. The reason stands above.");

@@ -181,14 +181,21 @@ export async function startServer(folder, logs, { extraSql = "" } = {}) {
   const server = describe(parts, secrets, port, child.pid);
   await waitUntilUp(server, () => !exited);
   child.unref();
-  return { ...server, child };
+  return server;
+}
+
+/** Resolves when the server has ended, whoever started it. */
+export async function serverGone(server) {
+  while (runningPid(server) === server.pid) await pause(1000, undefined, { ref: false });
 }
 
 async function waitUntilUp(server, lives) {
   const until = Date.now() + START_PATIENCE;
   while (!answers(server)) {
     if (!lives()) {
-      const reasons = lastLines(readFileSync(server.log, "utf8"), 200).filter((line) => line.includes("[ERROR]")).slice(0, 4);
+      const reasons = lastLines(readFileSync(server.log, "utf8"), 200)
+        .filter((line) => line.includes("[ERROR]"))
+        .slice(0, 4);
       throw new Refusal(["The database did not start.", ...reasons.map((line) => `  ${line}`), `Its whole log: ${server.log}`].join("\n"));
     }
     if (Date.now() > until) throw new Refusal(`The database did not answer within ${START_PATIENCE / 1000} seconds. Its log: ${server.log}`);

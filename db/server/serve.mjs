@@ -4,14 +4,16 @@ import { appEnv, logsOf, migrate, openDatabase } from "./database.mjs";
 import { demoSignIns, ensureDemo, hasDemo } from "./demo.mjs";
 import { ensureDependencies } from "./install.mjs";
 import { takeDataFolder } from "./lock.mjs";
+import { serverGone } from "./mariadb.mjs";
 import { isPortFree } from "./ports.mjs";
 import { askedToStop, stop, stopAll } from "./processes.mjs";
 import { Refusal, say } from "./say.mjs";
 import { appPort, dataFolder } from "./settings.mjs";
 
-async function announce(env) {
+async function announce(url, env) {
   say("");
-  say(`Curbweight is at ${env.NEXTAUTH_URL}`);
+  say(`Curbweight is at ${url}`);
+  if (env.NEXTAUTH_URL !== url) say(`NEXTAUTH_URL says that people open ${env.NEXTAUTH_URL}: sign-in works there.`);
   if (await hasDemo(env)) {
     const { outfit, password, people } = demoSignIns();
     say(`${outfit} is the demo outfit. Everyone and everything in it is invented. Sign in as:`);
@@ -33,7 +35,7 @@ async function setUpAndServe(mode, folder, port, opened) {
   await ensureDemo(env);
   if (mode === "start") await ensureBuild(logs);
   const app = await startApp({ mode, port, env });
-  await announce(env);
+  await announce(url, env);
   return { app, database };
 }
 
@@ -45,11 +47,13 @@ const never = new Promise(() => {});
  */
 export async function serve(mode) {
   const port = appPort();
-  if (!(await isPortFree(port))) {
-    throw new Refusal(`Port ${port} is taken by another program. Stop that one, or choose another port: PORT=${port === 65535 ? 3000 : port + 1} npm ${mode === "start" ? "start" : "run dev"}`);
-  }
   const folder = dataFolder();
   takeDataFolder(folder, `the app on http://127.0.0.1:${port}`);
+  if (!(await isPortFree(port))) {
+    throw new Refusal(
+      `Port ${port} is taken by another program. Stop that one, or choose another port: PORT=${port === 65535 ? 3000 : port + 1} npm ${mode === "start" ? "start" : "run dev"}`,
+    );
+  }
   const asked = askedToStop();
   const opened = [];
   let code = 0;
@@ -58,9 +62,8 @@ export async function serve(mode) {
     const served = await Promise.race([setUp, asked]);
     if (served !== "asked") {
       const appEnded = new Promise((resolve) => served.app.once("exit", () => resolve("The app ended on its own. The reason stands above.")));
-      const databaseEnded = served.database.server?.child
-        ? new Promise((resolve) => served.database.server.child.once("exit", () => resolve("The database ended on its own, so the app stops too.")))
-        : never;
+      const { server } = served.database;
+      const databaseEnded = server ? serverGone(server).then(() => "The database ended on its own, so the app stops too.") : never;
       const reason = await Promise.race([asked, appEnded, databaseEnded]);
       if (reason !== "asked") {
         say(reason);
