@@ -32,7 +32,7 @@ export async function ensureDependencies(logs) {
   await runQuietly(npm, ["ci", "--include=dev", "--no-audit", "--no-fund"], {
     logFile: path.join(logs, "npm-ci.log"),
     failure: "npm could not install the packages. Check that this machine reaches the npm registry, then try again.",
-    env: { ...process.env, NODE_ENV: "development" },
+    env: { ...process.env, NODE_ENV: "development", PATH: `${path.dirname(process.execPath)}${path.delimiter}${process.env.PATH ?? ""}` },
   });
 }
 
