@@ -4,19 +4,7 @@ export const ROLES = ["owner", "bookkeeper", "collector", "sorter"] as const;
 
 export const WEIGHT_UNITS_OF_BOOKS = ["lb", "kg"] as const;
 
-export const FAMILIES = [
-  "copper",
-  "wire",
-  "brass",
-  "aluminum",
-  "steel",
-  "stainless",
-  "lead-zinc",
-  "motors",
-  "electronics",
-  "precious",
-  "other",
-] as const;
+export const FAMILIES = ["copper", "wire", "brass", "aluminum", "steel", "stainless", "lead-zinc", "motors", "electronics", "precious", "other"] as const;
 
 export const PLACES = ["outside", "pile", "bin", "load", "sold", "waste", "variance"] as const;
 

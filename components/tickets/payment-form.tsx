@@ -19,7 +19,21 @@ type Values = { paidOn: string; amount: string; method: string };
 const WORDS = { cash: "Cash", check: "Check", transfer: "Transfer", card: "Card" } as const;
 
 /** Recording what the yard paid: all that is left unless another amount is typed. */
-export function PaymentForm({ slug, ticketId, outfit, leftMinor, today, method }: { slug: string; ticketId: string; outfit: Money; leftMinor: number; today: string; method: string | null }) {
+export function PaymentForm({
+  slug,
+  ticketId,
+  outfit,
+  leftMinor,
+  today,
+  method,
+}: {
+  slug: string;
+  ticketId: string;
+  outfit: Money;
+  leftMinor: number;
+  today: string;
+  method: string | null;
+}) {
   const router = useRouter();
   const { register, handleSubmit, ...form } = useForm<Values>({
     defaultValues: { paidOn: today, amount: decimalFromMinor(leftMinor, outfit.exponent), method: method ?? "check" },
@@ -41,7 +55,14 @@ export function PaymentForm({ slug, ticketId, outfit, leftMinor, today, method }
   return (
     <form noValidate className="grid gap-3" onSubmit={handleSubmit(send)}>
       <ErrorSummary problems={errors.map((error) => (error.path === "" ? { message: error.message } : { field: error.path, message: error.message }))} />
-      <NumberInput id="amountMinor" label="Paid" unit={outfit.currency} currencySymbols={["$", outfit.currency]} error={errorAt("amountMinor")} {...register("amount")} />
+      <NumberInput
+        id="amountMinor"
+        label="Paid"
+        unit={outfit.currency}
+        currencySymbols={["$", outfit.currency]}
+        error={errorAt("amountMinor")}
+        {...register("amount")}
+      />
       <TextField id="paidOn" label="On" type="date" max={today} error={errorAt("paidOn")} {...register("paidOn")} />
       <ChipGroup
         legend="How"

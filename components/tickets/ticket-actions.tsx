@@ -60,7 +60,11 @@ export function TicketActions({ slug, id, number, state, mayPost, mayVoid, mayCh
             <h2>Void ticket {number}?</h2>
           </header>
           <div className="in grid gap-3">
-            <p>{state === "draft" ? "Nothing was booked yet. The number can be used again." : "The metal goes back into the bins, and the sale and its payments are taken back in both books. The record stays."}</p>
+            <p>
+              {state === "draft"
+                ? "Nothing was booked yet. The number can be used again."
+                : "The metal goes back into the bins, and the sale and its payments are taken back in both books. The record stays."}
+            </p>
             <div className="flex flex-wrap gap-4">
               <Button variant="line" onClick={() => setAsking(false)}>
                 Keep ticket

@@ -101,7 +101,13 @@ export function TicketForm({ slug, outfit, today, choices, start, kept, mayPost 
       />
       <ErrorSummary problems={errors.map((error) => (error.path === "" ? { message: error.message } : { field: error.path, message: error.message }))} />
       <Panel className="tk">
-        <TicketHeadFields yards={choices.yards} today={today} sheetFrom={sheetFrom === null ? null : formatShortDate(sheetFrom, { today })} register={register} errorAt={errorAt} />
+        <TicketHeadFields
+          yards={choices.yards}
+          today={today}
+          sheetFrom={sheetFrom === null ? null : formatShortDate(sheetFrom, { today })}
+          register={register}
+          errorAt={errorAt}
+        />
         <Perf />
         <h2 className="tk-title">On their ticket, and our check</h2>
         {fields.map((field, index) => {

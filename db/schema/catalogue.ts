@@ -29,11 +29,7 @@ export const grades = mysqlTable(
     active: boolean("active").notNull().default(true),
     version: int("version").notNull().default(1),
   },
-  (t) => [
-    primaryKey({ columns: [t.outfitId, t.id] }),
-    uniqueIndex("grades_key").on(t.outfitId, t.key),
-    uniqueIndex("grades_name").on(t.outfitId, t.name),
-  ],
+  (t) => [primaryKey({ columns: [t.outfitId, t.id] }), uniqueIndex("grades_key").on(t.outfitId, t.key), uniqueIndex("grades_name").on(t.outfitId, t.name)],
 );
 
 /** A type of thing found, with what it usually weighs and the hazards it carries. */

@@ -2,10 +2,36 @@
  * Words that people use when a password must be long: fifteen characters or more made of these alone are refused. Common practice; the
  * list is from memory, so it also refuses by pattern (repeats, runs, the person's own words).
  */
-const COMMON_STARTS = ["password", "passw0rd", "qwerty", "letmein", "iloveyou", "welcome", "administrator", "changeme", "trustno1", "football", "baseball", "sunshine", "princess", "monkey", "dragon", "master", "superman", "secret", "abc123", "correct horse battery staple", "correcthorsebatterystaple"];
+const COMMON_STARTS = [
+  "password",
+  "passw0rd",
+  "qwerty",
+  "letmein",
+  "iloveyou",
+  "welcome",
+  "administrator",
+  "changeme",
+  "trustno1",
+  "football",
+  "baseball",
+  "sunshine",
+  "princess",
+  "monkey",
+  "dragon",
+  "master",
+  "superman",
+  "secret",
+  "abc123",
+  "correct horse battery staple",
+  "correcthorsebatterystaple",
+];
 const RUNS = ["abcdefghijklmnopqrstuvwxyz", "01234567890123456789", "98765432109876543210", "qwertyuiopasdfghjklzxcvbnm", "qwertyuiop[]asdfghjkl"];
 
-const bare = (text: string) => text.normalize("NFKC").toLowerCase().replaceAll(/[^\p{L}\p{N}]/gu, "");
+const bare = (text: string) =>
+  text
+    .normalize("NFKC")
+    .toLowerCase()
+    .replaceAll(/[^\p{L}\p{N}]/gu, "");
 
 /** Whether a password of enough length is still one that an attacker tries first: common words, runs, repeats, or the person's own words. */
 export function isCommonPassword(password: string, ownWords: string[] = []): boolean {

@@ -9,11 +9,13 @@ export type RuleResult = { rule: string; holds: boolean; detail: string };
 const RULES: { rule: string; breaches: (outfitId: string) => SQL }[] = [
   {
     rule: "Every entry's postings sum to zero",
-    breaches: (o) => sql`select entry_id as what, sum(amount_minor) as off from postings where outfit_id = ${o} group by entry_id having sum(amount_minor) <> 0 limit 5`,
+    breaches: (o) =>
+      sql`select entry_id as what, sum(amount_minor) as off from postings where outfit_id = ${o} group by entry_id having sum(amount_minor) <> 0 limit 5`,
   },
   {
     rule: "Every movement's lines sum to zero",
-    breaches: (o) => sql`select movement_id as what, sum(quantity) as off from movement_lines where outfit_id = ${o} group by movement_id having sum(quantity) <> 0 limit 5`,
+    breaches: (o) =>
+      sql`select movement_id as what, sum(quantity) as off from movement_lines where outfit_id = ${o} group by movement_id having sum(quantity) <> 0 limit 5`,
   },
   {
     rule: "Every entry and movement has lines, dated like itself",

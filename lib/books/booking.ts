@@ -63,20 +63,46 @@ export function totalsBy<T, V>(items: T[], key: (item: T) => string | undefined,
 }
 
 /** Change of each bin's balance. */
-export const binChanges = (lines: MovementLine[]) => totalsBy(lines, (line) => line.binId, (line) => line.quantity, add);
+export const binChanges = (lines: MovementLine[]) =>
+  totalsBy(
+    lines,
+    (line) => line.binId,
+    (line) => line.quantity,
+    add,
+  );
 
 /** Change of each lot's remaining weight. */
 export const lotWeightChanges = (lines: MovementLine[]) =>
-  totalsBy(lines, (line) => (line.place === "pile" ? line.pickupId : undefined), (line) => line.quantity, add);
+  totalsBy(
+    lines,
+    (line) => (line.place === "pile" ? line.pickupId : undefined),
+    (line) => line.quantity,
+    add,
+  );
 
 /** Change of what the outfit holds of each grade, over bins and loads. */
 export const stockQuantityChanges = (lines: MovementLine[]) =>
-  totalsBy(lines, (line) => (line.place === "bin" || line.place === "load" ? line.gradeId : undefined), (line) => line.quantity, add);
+  totalsBy(
+    lines,
+    (line) => (line.place === "bin" || line.place === "load" ? line.gradeId : undefined),
+    (line) => line.quantity,
+    add,
+  );
 
 /** Change of each grade's cost: scrap-stock postings that name a grade. */
 export const stockCostChanges = (postings: Posting[]) =>
-  totalsBy(postings, (p) => (p.account === "scrap-stock" ? p.gradeId : undefined), (p) => p.amountMinor, (a, b) => a + b);
+  totalsBy(
+    postings,
+    (p) => (p.account === "scrap-stock" ? p.gradeId : undefined),
+    (p) => p.amountMinor,
+    (a, b) => a + b,
+  );
 
 /** Change of each lot's remaining cost: scrap-stock postings that name a pickup and no grade. */
 export const lotCostChanges = (postings: Posting[]) =>
-  totalsBy(postings, (p) => (p.account === "scrap-stock" && p.gradeId === undefined ? p.pickupId : undefined), (p) => p.amountMinor, (a, b) => a + b);
+  totalsBy(
+    postings,
+    (p) => (p.account === "scrap-stock" && p.gradeId === undefined ? p.pickupId : undefined),
+    (p) => p.amountMinor,
+    (a, b) => a + b,
+  );

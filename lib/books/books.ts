@@ -236,7 +236,12 @@ export class Books {
   }
 
   private async moveAccounts(booking: Booking): Promise<void> {
-    const changes = totalsBy(booking.postings, (p) => p.account, (p) => p.amountMinor, (a, b) => a + b);
+    const changes = totalsBy(
+      booking.postings,
+      (p) => p.account,
+      (p) => p.amountMinor,
+      (a, b) => a + b,
+    );
     if (changes.size === 0) return;
     // Sorted, so that all writers touch the accounts in one order.
     const sorted = [...changes].sort(([a], [b]) => (a < b ? -1 : 1));

@@ -21,7 +21,12 @@ async function standingMovements(books: Books, document: DocumentRef): Promise<H
         eq(movements.documentType, document.type),
         eq(movements.documentId, document.id),
         isNull(movements.reversesId),
-        notExists(books.tx.select({ id: later.id }).from(later).where(and(eq(later.outfitId, movements.outfitId), eq(later.reversesId, movements.id)))),
+        notExists(
+          books.tx
+            .select({ id: later.id })
+            .from(later)
+            .where(and(eq(later.outfitId, movements.outfitId), eq(later.reversesId, movements.id))),
+        ),
       ),
     )
     .orderBy(desc(movements.sequence));
@@ -38,7 +43,12 @@ async function standingEntries(books: Books, document: DocumentRef): Promise<Hea
         eq(entries.documentType, document.type),
         eq(entries.documentId, document.id),
         isNull(entries.reversesId),
-        notExists(books.tx.select({ id: later.id }).from(later).where(and(eq(later.outfitId, entries.outfitId), eq(later.reversesId, entries.id)))),
+        notExists(
+          books.tx
+            .select({ id: later.id })
+            .from(later)
+            .where(and(eq(later.outfitId, entries.outfitId), eq(later.reversesId, entries.id))),
+        ),
       ),
     )
     .orderBy(desc(entries.sequence));

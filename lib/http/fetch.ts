@@ -29,10 +29,14 @@ async function answerOf<T>(send: () => Promise<Response>): Promise<T> {
 }
 
 /** Reads from the API. Throws ApiProblem. */
-export const apiGet = <T>(path: string, signal?: AbortSignal): Promise<T> => answerOf<T>(() => fetch(path, { headers: { accept: "application/json" }, ...(signal ? { signal } : {}) }));
+export const apiGet = <T>(path: string, signal?: AbortSignal): Promise<T> =>
+  answerOf<T>(() => fetch(path, { headers: { accept: "application/json" }, ...(signal ? { signal } : {}) }));
 
 /** Sends a change to the API. Throws ApiProblem. The same idempotency key sent again books nothing twice. */
-export const apiSend = <T>(path: string, more: { method?: "POST" | "PATCH" | "DELETE"; body?: unknown; ifMatch?: number; idempotencyKey?: string } = {}): Promise<T> =>
+export const apiSend = <T>(
+  path: string,
+  more: { method?: "POST" | "PATCH" | "DELETE"; body?: unknown; ifMatch?: number; idempotencyKey?: string } = {},
+): Promise<T> =>
   answerOf<T>(() =>
     fetch(path, {
       method: more.method ?? "POST",

@@ -24,12 +24,10 @@ const decimalWithin = (label: string, places: number, limit: string) =>
     .refine((text) => compare(text, limit) < 0, `${label} must be less than ${limit}.`);
 
 /** A weight of zero or more, at most four decimals, under ten million. */
-export const weightField = (label: string) =>
-  decimalWithin(label, 4, "10000000").refine((text) => !isNegative(text), `${label} must be 0 or more.`);
+export const weightField = (label: string) => decimalWithin(label, 4, "10000000").refine((text) => !isNegative(text), `${label} must be 0 or more.`);
 
 /** A weight above zero. */
-export const positiveWeightField = (label: string) =>
-  decimalWithin(label, 4, "10000000").refine(isPositive, `${label} must be more than 0.`);
+export const positiveWeightField = (label: string) => decimalWithin(label, 4, "10000000").refine(isPositive, `${label} must be more than 0.`);
 
 /** A price of zero or more, at most six decimals, under a million. */
 export const priceField = (label = "Price") => decimalWithin(label, 6, "1000000").refine((text) => !isNegative(text), `${label} must be 0 or more.`);
@@ -90,7 +88,12 @@ export const perField = z.enum(PRICE_UNITS, "Per must be one of lb, kg, cwt, sho
 
 /** Query of a list: how many, and where the page starts. */
 export const pageFields = {
-  limit: z.coerce.number("Limit must be a number.").int("Limit must be a whole number.").min(1, "Limit must be 1 or more.").max(200, "Limit must be 200 or fewer.").default(50),
+  limit: z.coerce
+    .number("Limit must be a number.")
+    .int("Limit must be a whole number.")
+    .min(1, "Limit must be 1 or more.")
+    .max(200, "Limit must be 200 or fewer.")
+    .default(50),
   cursor: z.string().max(200, "That is not a cursor of this list.").optional(),
 };
 

@@ -17,7 +17,12 @@ const problem = { $ref: "#/components/responses/Problem" };
 function parametersOf({ path, definition }: ListedRoute): Json[] {
   const inPath = [...path.matchAll(/\{(\w+)\}/g)].map((match) => ({ name: match[1], in: "path", required: true, schema: { type: "string" } }));
   const query = definition.query ? (schemaOf(definition.query, "input") as { properties?: Record<string, Json>; required?: string[] }) : {};
-  const inQuery = Object.entries(query.properties ?? {}).map(([name, schema]) => ({ name, in: "query", required: query.required?.includes(name) ?? false, schema }));
+  const inQuery = Object.entries(query.properties ?? {}).map(([name, schema]) => ({
+    name,
+    in: "query",
+    required: query.required?.includes(name) ?? false,
+    schema,
+  }));
   const headers = [
     ...(definition.idempotent ? [{ name: "Idempotency-Key", in: "header", required: false, schema: { type: "string", maxLength: 255 } }] : []),
     ...(definition.versioned ? [{ name: "If-Match", in: "header", required: true, schema: { type: "string" } }] : []),
@@ -34,7 +39,9 @@ function permissionWords(permission: RouteDefinition["permission"]): string {
 function operationOf(listed: ListedRoute): Json {
   const { definition, method, path } = listed;
   const good =
-    definition.status === 204 ? { description: "Done." } : { description: "Done.", content: { "application/json": { schema: schemaOf(definition.response, "output") } } };
+    definition.status === 204
+      ? { description: "Done." }
+      : { description: "Done.", content: { "application/json": { schema: schemaOf(definition.response, "output") } } };
   const refusals = ["400", "401", "403", "404", "409", "412", "413", "415", "422", "429", "500"];
   return {
     operationId: `${method}${path.replaceAll(/[^A-Za-z]+(\w)/g, (_match, letter: string) => letter.toUpperCase()).replaceAll(/\W/g, "")}`,

@@ -78,7 +78,9 @@ const sha256 = (text: string) => createHash("sha256").update(text).digest("hex")
 /** JSON with sorted keys, so that the same input always has the same fingerprint. */
 function canonical(value: unknown): string {
   return JSON.stringify(value, (_key, inner: unknown) =>
-    inner !== null && typeof inner === "object" && !Array.isArray(inner) ? Object.fromEntries(Object.entries(inner).sort(([a], [b]) => (a < b ? -1 : 1))) : inner,
+    inner !== null && typeof inner === "object" && !Array.isArray(inner)
+      ? Object.fromEntries(Object.entries(inner).sort(([a], [b]) => (a < b ? -1 : 1)))
+      : inner,
   );
 }
 

@@ -145,14 +145,23 @@ export function route<Q extends Schema | undefined = undefined, B extends Schema
       return failed(error, request, requestId);
     }
   };
-  return Object.assign(run, { definition: { permission, summary, response, status, idempotent, versioned, ...(query ? { query } : {}), ...(body ? { body } : {}) } });
+  return Object.assign(run, {
+    definition: { permission, summary, response, status, idempotent, versioned, ...(query ? { query } : {}), ...(body ? { body } : {}) },
+  });
 }
 
 /** A route of a signed-in person, outside any outfit. */
 export function personRoute<Q extends Schema | undefined = undefined, B extends Schema | undefined = undefined, R extends Schema = Schema>(
   definition: Shape<Q, B, R> & {
     permission: "person";
-    handler: (input: { person: Person; params: Record<string, string>; query: Output<Q>; body: Output<B>; requestId: string; now: Date }) => Promise<z.input<R>>;
+    handler: (input: {
+      person: Person;
+      params: Record<string, string>;
+      query: Output<Q>;
+      body: Output<B>;
+      requestId: string;
+      now: Date;
+    }) => Promise<z.input<R>>;
   },
 ): RouteHandler {
   const { permission, query, body, response, status = 200, summary } = definition;
@@ -171,7 +180,9 @@ export function personRoute<Q extends Schema | undefined = undefined, B extends 
       return failed(error, request, requestId);
     }
   };
-  return Object.assign(run, { definition: { permission, summary, response, status, idempotent: false, versioned: false, ...(query ? { query } : {}), ...(body ? { body } : {}) } });
+  return Object.assign(run, {
+    definition: { permission, summary, response, status, idempotent: false, versioned: false, ...(query ? { query } : {}), ...(body ? { body } : {}) },
+  });
 }
 
 /** A route that anybody may call. It says so, and it says how often. */
@@ -197,5 +208,7 @@ export function publicRoute<Q extends Schema | undefined = undefined, B extends 
       return failed(error, request, requestId);
     }
   };
-  return Object.assign(run, { definition: { permission, summary, response, status, idempotent: false, versioned: false, ...(query ? { query } : {}), ...(body ? { body } : {}) } });
+  return Object.assign(run, {
+    definition: { permission, summary, response, status, idempotent: false, versioned: false, ...(query ? { query } : {}), ...(body ? { body } : {}) },
+  });
 }

@@ -35,7 +35,12 @@ async function insertWithFreeSlug(tx: Transaction, outfit: NewOutfit, id: string
 }
 
 /** Makes an outfit with its accounts, its books, its catalogue and its first owner. */
-export async function createOutfit(tx: Transaction, outfit: NewOutfit, owner: { userId: string }, now: Date): Promise<{ id: string; slug: string; memberId: string }> {
+export async function createOutfit(
+  tx: Transaction,
+  outfit: NewOutfit,
+  owner: { userId: string },
+  now: Date,
+): Promise<{ id: string; slug: string; memberId: string }> {
   const id = newId();
   const memberId = newId();
   const slug = await insertWithFreeSlug(tx, outfit, id, now);

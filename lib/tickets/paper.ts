@@ -34,7 +34,19 @@ export type TypedTicket = {
 
 export type Money = { weightUnit: "lb" | "kg"; currency: string; exponent: number };
 
-export const emptyLine = (): TypedLine => ({ yardWording: "", gradeId: "", binId: "", gross: "", tare: "", deduction: "", net: "", pieces: "", price: "", per: "lb", amount: "" });
+export const emptyLine = (): TypedLine => ({
+  yardWording: "",
+  gradeId: "",
+  binId: "",
+  gross: "",
+  tare: "",
+  deduction: "",
+  net: "",
+  pieces: "",
+  price: "",
+  per: "lb",
+  amount: "",
+});
 
 const SIGNS = ["$", "€", "£"];
 
@@ -107,7 +119,16 @@ export function readLine(typed: TypedLine, outfit: Money): ReadLine {
 }
 
 /** Column totals and the total that the lines, tax and fees make. */
-export type ReadTicket = { lines: ReadLine[]; gross: string; tare: string; deduction: string; net: string; amountMinor: number; totalExpected: number; totalMinor: number };
+export type ReadTicket = {
+  lines: ReadLine[];
+  gross: string;
+  tare: string;
+  deduction: string;
+  net: string;
+  amountMinor: number;
+  totalExpected: number;
+  totalMinor: number;
+};
 
 /** Reads the whole paper. Lines that cannot be told yet count as nothing. */
 export function readTicket(typed: TypedTicket, outfit: Money): ReadTicket {
@@ -128,7 +149,8 @@ export function readTicket(typed: TypedTicket, outfit: Money): ReadTicket {
   };
 }
 
-const optional = <K extends string>(name: K, value: string | undefined): Partial<Record<K, string>> => (value === undefined || value.trim() === "" ? {} : ({ [name]: value } as Record<K, string>));
+const optional = <K extends string>(name: K, value: string | undefined): Partial<Record<K, string>> =>
+  value === undefined || value.trim() === "" ? {} : ({ [name]: value } as Record<K, string>);
 
 /** Money as minor units for the API; text that is no amount stays text, so that the schema names the field. */
 const sentMinor = (text: string, outfit: Money): number | string | undefined => (text.trim() === "" ? undefined : (readMinor(text, outfit) ?? text));

@@ -33,7 +33,12 @@ export async function makeOutfit(more: Partial<NewOutfit> = {}): Promise<TestOut
   const ownerId = await makeUser("Owner");
   const now = new Date();
   const outfit = await inTransaction((tx) =>
-    createOutfit(tx, { name: "Test outfit", country: "US", currency: "USD", weightUnit: "lb", timeZone: "America/New_York", ...more }, { userId: ownerId }, now),
+    createOutfit(
+      tx,
+      { name: "Test outfit", country: "US", currency: "USD", weightUnit: "lb", timeZone: "America/New_York", ...more },
+      { userId: ownerId },
+      now,
+    ),
   );
   const members = { owner: outfit.memberId } as Record<Role, string>;
   const keys = {} as Record<Role, string>;
@@ -47,10 +52,23 @@ export async function makeOutfit(more: Partial<NewOutfit> = {}): Promise<TestOut
     keys[role] = makeToken("cw");
     await database()
       .insert(apiKeys)
-      .values({ outfitId: outfit.id, id: newId(), name: role, role, prefix: keys[role].slice(0, 10), keyHash: hashToken(keys[role]), createdBy: members[role], createdAt: now });
+      .values({
+        outfitId: outfit.id,
+        id: newId(),
+        name: role,
+        role,
+        prefix: keys[role].slice(0, 10),
+        keyHash: hashToken(keys[role]),
+        createdBy: members[role],
+        createdAt: now,
+      });
   }
-  const gradeIds = new Map((await database().select({ id: grades.id, key: grades.key }).from(grades).where(eq(grades.outfitId, outfit.id))).map((g) => [g.key, g.id]));
-  const kindIds = new Map((await database().select({ id: itemKinds.id, key: itemKinds.key }).from(itemKinds).where(eq(itemKinds.outfitId, outfit.id))).map((k) => [k.key, k.id]));
+  const gradeIds = new Map(
+    (await database().select({ id: grades.id, key: grades.key }).from(grades).where(eq(grades.outfitId, outfit.id))).map((g) => [g.key, g.id]),
+  );
+  const kindIds = new Map(
+    (await database().select({ id: itemKinds.id, key: itemKinds.key }).from(itemKinds).where(eq(itemKinds.outfitId, outfit.id))).map((k) => [k.key, k.id]),
+  );
   const need = (ids: Map<string | null, string>, key: string) => {
     const id = ids.get(key);
     if (id === undefined) throw new Error(`no ${key} in the catalogue`);

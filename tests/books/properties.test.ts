@@ -35,7 +35,21 @@ type Step = {
 };
 
 const step: fc.Arbitrary<Step> = fc.record({
-  act: fc.constantFrom<Step["act"]>("pickup", "weigh", "weigh", "weigh", "count", "sell", "sell", "pay", "void-weigh-in", "void-count", "void-ticket", "void-pickup", "work-out"),
+  act: fc.constantFrom<Step["act"]>(
+    "pickup",
+    "weigh",
+    "weigh",
+    "weigh",
+    "count",
+    "sell",
+    "sell",
+    "pay",
+    "void-weigh-in",
+    "void-count",
+    "void-ticket",
+    "void-pickup",
+    "work-out",
+  ),
   pick: fc.nat(1000),
   tenths: fc.integer({ min: 1, max: 900 }),
   money: fc.integer({ min: 0, max: 9000 }),
@@ -93,7 +107,13 @@ class Run {
     } else if (act === "weigh") {
       const pickupId = pick % 2 === 0 ? this.choose(model.pickups, pick) : undefined;
       const from = pickupId === undefined ? (pick % 3 === 0 ? { fromPile: true } : {}) : { pickupId };
-      const answer = await this.send<{ id: string; net: string }>(weighIns.POST, again, { binId, gross: tenths(weight + 20), tare: "2.0", weighedOn: DAY, ...from });
+      const answer = await this.send<{ id: string; net: string }>(weighIns.POST, again, {
+        binId,
+        gross: tenths(weight + 20),
+        tare: "2.0",
+        weighedOn: DAY,
+        ...from,
+      });
       if (answer.status === 201) model.weighIns.push({ id: answer.body.id, binId, quantity: answer.body.net });
     } else if (act === "count") {
       const answer = await this.send<{ id: string; difference: string }>(counts.POST, again, { binId, gross: tenths(weight), tare: "0", countedOn: DAY });
@@ -116,7 +136,13 @@ class Run {
     const net = tenths(weight);
     const amountMinor = lineAmount({ quantity: net, unit: "lb", price, per: "lb", exponent: 2 });
     this.serial += 1;
-    const body = { yardId: this.yardId, number: `P-${this.serial}-${newId().slice(-6)}`, ticketOn: DAY, lines: [{ gradeId, binId, net, price, per: "lb", amountMinor }], totalMinor: amountMinor };
+    const body = {
+      yardId: this.yardId,
+      number: `P-${this.serial}-${newId().slice(-6)}`,
+      ticketOn: DAY,
+      lines: [{ gradeId, binId, net, price, per: "lb", amountMinor }],
+      totalMinor: amountMinor,
+    };
     const draft = await this.send<{ id: string }>(tickets.POST, again, body);
     expect(draft.status, JSON.stringify(draft.body)).toBe(201);
     const posted = await this.send(ticketPost.POST, again, {}, draft.body.id);

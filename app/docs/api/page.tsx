@@ -7,7 +7,13 @@ export const metadata: Metadata = { title: "The API" };
 export const dynamic = "force-static";
 
 type Parameter = { name: string; in: string; required: boolean };
-type Operation = { summary: string; description: string; parameters: Parameter[]; requestBody?: { content: Record<string, { schema: unknown }> }; responses: Record<string, { content?: Record<string, { schema: unknown }> }> };
+type Operation = {
+  summary: string;
+  description: string;
+  parameters: Parameter[];
+  requestBody?: { content: Record<string, { schema: unknown }> };
+  responses: Record<string, { content?: Record<string, { schema: unknown }> }>;
+};
 
 function Shape({ label, schema }: { label: string; schema: unknown }) {
   return (

@@ -21,7 +21,31 @@ const DAY = "2026-01-15";
 /** Words go into these as they are, within their length; everything else has a form. */
 const WORDS = /(^|\.)(place|note|name|label|number|yardWording|phone|hours)$/;
 
-const NEVER: unknown[] = ["", "-1", -1, "NaN", Number.MAX_SAFE_INTEGER + 2, "Infinity", "1e5", "0x10", 1.23456, "1.23456", "9".repeat(40), "١٢", "12,5", true, null, [], {}, "x".repeat(300_000), "🪙", "2026-02-30", "9999-01-01", "1899-12-31", "'; drop table grades; --"];
+const NEVER: unknown[] = [
+  "",
+  "-1",
+  -1,
+  "NaN",
+  Number.MAX_SAFE_INTEGER + 2,
+  "Infinity",
+  "1e5",
+  "0x10",
+  1.23456,
+  "1.23456",
+  "9".repeat(40),
+  "١٢",
+  "12,5",
+  true,
+  null,
+  [],
+  {},
+  "x".repeat(300_000),
+  "🪙",
+  "2026-02-30",
+  "9999-01-01",
+  "1899-12-31",
+  "'; drop table grades; --",
+];
 
 /** Values of the list above that a field may truly take, by the end of its path. */
 const FINE: Record<string, (value: unknown) => boolean> = {
@@ -57,16 +81,32 @@ const CASES: Case[] = [
   {
     name: "pickups",
     handler: pickups.POST,
-    body: () => ({ pickedUpOn: DAY, source: "curb", place: "Alder Row", items: [{ itemKindId: outfit.kind("printer"), count: 2, weight: "31.5" }], paidMinor: 500, note: "two" }),
+    body: () => ({
+      pickedUpOn: DAY,
+      source: "curb",
+      place: "Alder Row",
+      items: [{ itemKindId: outfit.kind("printer"), count: 2, weight: "31.5" }],
+      paidMinor: 500,
+      note: "two",
+    }),
   },
-  { name: "bins", handler: bins.POST, body: () => ({ label: `L-${newId().slice(-8)}`, gradeId: outfit.grade("shred"), tare: "4.5", place: "by the door", sellPoint: "300" }) },
+  {
+    name: "bins",
+    handler: bins.POST,
+    body: () => ({ label: `L-${newId().slice(-8)}`, gradeId: outfit.grade("shred"), tare: "4.5", place: "by the door", sellPoint: "300" }),
+  },
   { name: "weigh-ins", handler: weighIns.POST, body: () => ({ binId, gross: "14.25", tare: "1.85", unit: "lb", weighedOn: DAY, note: "clean" }) },
   { name: "counts", handler: counts.POST, body: () => ({ binId, gross: "12.4", tare: "1.85", countedOn: DAY, note: "monthly" }) },
   { name: "yards", handler: yards.POST, body: () => ({ name: `Yard ${newId()}`, place: "Lock Basin", note: "asks for ID" }) },
   {
     name: "price-sheets",
     handler: sheets.POST,
-    body: () => ({ yardId, inForceFrom: "2026-01-02", lastDay: "2026-01-20", lines: [{ gradeId: outfit.grade("no2-copper"), price: "3.96", per: "lb", yardWording: "#2 COPPER" }] }),
+    body: () => ({
+      yardId,
+      inForceFrom: "2026-01-02",
+      lastDay: "2026-01-20",
+      lines: [{ gradeId: outfit.grade("no2-copper"), price: "3.96", per: "lb", yardWording: "#2 COPPER" }],
+    }),
   },
   {
     name: "tickets",
@@ -75,7 +115,20 @@ const CASES: Case[] = [
       yardId,
       number: `T-${newId().slice(-10)}`,
       ticketOn: DAY,
-      lines: [{ gradeId: outfit.grade("no2-copper"), binId, gross: "62.4", tare: "3.6", deduction: "0", net: "58.8", price: "3.96", per: "lb", amountMinor: 23285, yardWording: "#2 COPPER" }],
+      lines: [
+        {
+          gradeId: outfit.grade("no2-copper"),
+          binId,
+          gross: "62.4",
+          tare: "3.6",
+          deduction: "0",
+          net: "58.8",
+          price: "3.96",
+          per: "lb",
+          amountMinor: 23285,
+          yardWording: "#2 COPPER",
+        },
+      ],
       taxMinor: 0,
       feeMinor: 0,
       totalMinor: 23285,
@@ -103,7 +156,10 @@ async function booked(outfitId: string): Promise<number[]> {
   const db = database();
   const [movementCount] = await db.select({ n: count() }).from(movements).where(eq(movements.outfitId, outfitId));
   const [entryCount] = await db.select({ n: count() }).from(entries).where(eq(entries.outfitId, outfitId));
-  const [auditCount] = await db.select({ n: count() }).from(auditLog).where(and(eq(auditLog.outfitId, outfitId)));
+  const [auditCount] = await db
+    .select({ n: count() })
+    .from(auditLog)
+    .where(and(eq(auditLog.outfitId, outfitId)));
   return [movementCount?.n ?? 0, entryCount?.n ?? 0, auditCount?.n ?? 0];
 }
 
@@ -124,7 +180,10 @@ describe.each(CASES)("POST /$name", ({ handler, body }) => {
         const answer = await call(handler, outfit, { key: outfit.keys.owner, body: withValue(body(), path, value) });
         const told = `${at} = ${JSON.stringify(value)?.slice(0, 40)}: ${answer.status} ${JSON.stringify(answer.body).slice(0, 300)}`;
         expect([409, 422], told).toContain(answer.status);
-        expect((answer.problem.errors ?? []).some((error) => error.path.startsWith(at) || at.startsWith(error.path)), told).toBe(true);
+        expect(
+          (answer.problem.errors ?? []).some((error) => error.path.startsWith(at) || at.startsWith(error.path)),
+          told,
+        ).toBe(true);
         expect(await booked(outfit.id), told).toEqual(before);
       }
     }
@@ -142,7 +201,12 @@ describe.each(CASES)("POST /$name", ({ handler, body }) => {
   });
 
   it("A-4: another outfit's things do not exist", async () => {
-    const theirs: Record<string, string> = { binId: foreignBin, yardId: foreignYard, gradeId: foreign.grade("no2-copper"), itemKindId: foreign.kind("printer") };
+    const theirs: Record<string, string> = {
+      binId: foreignBin,
+      yardId: foreignYard,
+      gradeId: foreign.grade("no2-copper"),
+      itemKindId: foreign.kind("printer"),
+    };
     for (const path of leaves(body())) {
       const value = theirs[path.at(-1) ?? ""];
       if (value === undefined) continue;

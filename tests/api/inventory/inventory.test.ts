@@ -29,7 +29,7 @@ function request(route: (typeof routes)[number], key: string | undefined, more: 
     params: rest,
     ...(key === undefined ? {} : { key }),
     ...(route.definition.body ? { body: {} } : {}),
-    headers: (route.definition.versioned ? { "if-match": "\"1\"" } : {}) as Record<string, string>,
+    headers: (route.definition.versioned ? { "if-match": '"1"' } : {}) as Record<string, string>,
     ...more,
   };
 }
@@ -61,13 +61,16 @@ describe("every route of the API", () => {
     expect(JSON.stringify(answer.body)).not.toContain(outfit.id);
   });
 
-  it.each(outfitRoutes.flatMap((route) => ROLES.map((role) => [name(route), role, route] as const)))("%s: lets a %s in exactly as the table says", async (_name, role, route) => {
-    const allowed = can(role, route.definition.permission as Permission);
-    const answer = await call(route.handler, outfit, request(route, outfit.keys[role]));
-    if (allowed) expect(answer.status, JSON.stringify(answer.body)).not.toBe(403);
-    else expect(answer.status).toBe(403);
-    expect(answer.status).toBeLessThan(500);
-  });
+  it.each(outfitRoutes.flatMap((route) => ROLES.map((role) => [name(route), role, route] as const)))(
+    "%s: lets a %s in exactly as the table says",
+    async (_name, role, route) => {
+      const allowed = can(role, route.definition.permission as Permission);
+      const answer = await call(route.handler, outfit, request(route, outfit.keys[role]));
+      if (allowed) expect(answer.status, JSON.stringify(answer.body)).not.toBe(403);
+      else expect(answer.status).toBe(403);
+      expect(answer.status).toBeLessThan(500);
+    },
+  );
 });
 
 describe("every route that takes a body", () => {
@@ -78,7 +81,11 @@ describe("every route that takes a body", () => {
     const base = request(route, keyFor(route), { body: undefined });
     const broken = await call(route.handler, outfit, { ...base, rawBody: '{"a": ' });
     expect(broken.status).toBe(400);
-    const form = await call(route.handler, outfit, { ...base, rawBody: "a=1", headers: { ...base.headers, "content-type": "application/x-www-form-urlencoded" } });
+    const form = await call(route.handler, outfit, {
+      ...base,
+      rawBody: "a=1",
+      headers: { ...base.headers, "content-type": "application/x-www-form-urlencoded" },
+    });
     expect(form.status).toBe(415);
     const huge = await call(route.handler, outfit, { ...base, rawBody: JSON.stringify({ note: "x".repeat(1_100_000) }) });
     expect(huge.status).toBe(413);
