@@ -12,6 +12,7 @@ const SHARED = ["arithmetic", "auth", "books", "http"];
 const AREAS = [
   ["people", "catalogue", "a new outfit starts with a copy of the catalogue"],
   ["pickups", "catalogue", "a haul is made of item kinds"],
+  ["pickups", "prices", "the rest of a haul's cost goes to its goods by what they would bring"],
   ["bench", "catalogue", "taking items apart follows their breakdown sheets"],
   ["bench", "bins", "weighed parts go into bins"],
   ["bench", "pickups", "items on the bench come from hauls"],

@@ -8,12 +8,12 @@ import { stockCostChanges, stockQuantityChanges, type Booking, type DocumentRef,
 import type { Account } from "./accounts";
 import type { Books } from "./books";
 
-type Head = { id: string; occurredOn: string; kind: string };
+type Head = { id: string; sequence: number; occurredOn: string; kind: string };
 
 async function standingMovements(books: Books, document: DocumentRef): Promise<Head[]> {
   const later = alias(movements, "later");
   return books.tx
-    .select({ id: movements.id, occurredOn: movements.occurredOn, kind: movements.kind })
+    .select({ id: movements.id, sequence: movements.sequence, occurredOn: movements.occurredOn, kind: movements.kind })
     .from(movements)
     .where(
       and(
@@ -35,7 +35,7 @@ async function standingMovements(books: Books, document: DocumentRef): Promise<H
 async function standingEntries(books: Books, document: DocumentRef): Promise<Head[]> {
   const later = alias(entries, "later");
   return books.tx
-    .select({ id: entries.id, occurredOn: entries.occurredOn, kind: entries.kind })
+    .select({ id: entries.id, sequence: entries.sequence, occurredOn: entries.occurredOn, kind: entries.kind })
     .from(entries)
     .where(
       and(
@@ -105,21 +105,36 @@ async function settlement(books: Books, lines: MovementLine[], opposite: Posting
   });
 }
 
+type Pair = { movement?: Head; entry?: Head };
+
+/** The records that one booking made, newest first: its movement took a number of the sequence and its entry the next. */
+function bookingsOf(movementHeads: Head[], entryHeads: Head[]): Pair[] {
+  const unpaired = new Map(entryHeads.map((entry) => [entry.sequence, entry]));
+  const pairs: Pair[] = movementHeads.map((movement) => {
+    const entry = unpaired.get(movement.sequence + 1);
+    if (!entry || entry.kind !== movement.kind || entry.occurredOn !== movement.occurredOn) return { movement };
+    unpaired.delete(entry.sequence);
+    return { movement, entry };
+  });
+  const all: Pair[] = [...pairs, ...[...unpaired.values()].map((entry) => ({ entry }))];
+  const sequenceOf = ({ movement, entry }: Pair) => (movement ?? entry)?.sequence ?? 0;
+  return all.sort((a, b) => sequenceOf(b) - sequenceOf(a));
+}
+
 /**
- * Takes back everything that stands in both books for a document, newest first, each by an opposite record that points at it. Dated like
- * the original, or in the first open month when the original's is closed. Throws `books-refuse` when a bin would go below zero.
+ * Takes back everything that stands in both books for a document (or only its bookings of one kind), newest first, each by an opposite
+ * record that points at it. Dated like the original, or in the first open month when the original's is closed. Throws `books-refuse` when a
+ * bin would go below zero.
  */
-export async function reverseDocument(books: Books, document: DocumentRef): Promise<void> {
-  const movementHeads = await standingMovements(books, document);
-  const entryHeads = await standingEntries(books, document);
-  const rounds = Math.max(movementHeads.length, entryHeads.length);
-  for (let index = 0; index < rounds; index += 1) {
-    const movement = movementHeads[index];
-    const entry = entryHeads[index];
-    const lines = movement ? await oppositeLines(books, movement.id) : [];
-    const opposite = entry ? await oppositePostings(books, entry.id) : [];
+export async function reverseDocument(books: Books, document: DocumentRef, { kind }: { kind?: Booking["kind"] } = {}): Promise<void> {
+  const wanted = (head: Head) => kind === undefined || head.kind === kind;
+  const movementHeads = (await standingMovements(books, document)).filter(wanted);
+  const entryHeads = (await standingEntries(books, document)).filter(wanted);
+  for (const { movement, entry } of bookingsOf(movementHeads, entryHeads)) {
     const head = movement ?? entry;
     if (!head) continue;
+    const lines = movement ? await oppositeLines(books, movement.id) : [];
+    const opposite = entry ? await oppositePostings(books, entry.id) : [];
     await books.post({
       kind: head.kind as Booking["kind"],
       on: await books.correctionDay(head.occurredOn),

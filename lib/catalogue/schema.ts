@@ -33,12 +33,21 @@ export const gradeInputSchema = z.strictObject({
   regulated: noteField,
 });
 
+/** Words that may be taken away by sending an empty text. */
+const clearableWords = (label: string) =>
+  z
+    .string(`${label} must be words.`)
+    .trim()
+    .max(2000, `${label} must be 2,000 letters or fewer.`)
+    .refine((text) => noteField.safeParse(text).success, `${label} has characters that cannot be kept.`)
+    .optional();
+
 /** What may be changed of a grade; at least one field. */
 export const gradeChangeSchema = z
   .strictObject({
     name: nameField("Name").optional(),
-    what: noteField,
-    notThis: noteField,
+    what: clearableWords("What"),
+    notThis: clearableWords("Not this"),
     active: z.boolean("Active must be true or false.").optional(),
   })
   .refine((change) => Object.values(change).some((value) => value !== undefined), "Say what to change: name, what, notThis or active.");

@@ -2,7 +2,7 @@ import "server-only";
 import { and, eq, sql } from "drizzle-orm";
 import { database } from "@/db/client";
 import { grades } from "@/db/schema";
-import { isDuplicateKey, type Transaction } from "@/db/transaction";
+import { databaseErrorText, isDuplicateKey, type Transaction } from "@/db/transaction";
 import type { Context } from "@/lib/auth/context";
 import { audit, transact } from "@/lib/books/transact";
 import { AppError, notFound } from "@/lib/http/errors";
@@ -24,7 +24,7 @@ export async function requireItemKind(ctx: Context, id: string): Promise<ItemKin
 }
 
 function nameTaken(error: unknown, name: string): unknown {
-  if (!isDuplicateKey(error)) return error;
+  if (!isDuplicateKey(error) || !databaseErrorText(error).includes("grades_name")) return error;
   const message = `There is a grade called ${name} already. Take another name.`;
   return new AppError("conflict", message, { errors: [{ path: "name", message }], cause: error });
 }
