@@ -85,7 +85,7 @@ export const itemKindParts = mysqlTable(
     altGrade: word("alt_grade", 60),
     leaveAs: word("leave_as", 60),
     perItem: int("per_item").notNull(),
-    /** All of this part in one item, in the outfit's book unit. */
+    /** One piece of this part, in the outfit's book unit; an item has `per_item` of them. */
     typicalWeight: weight("typical_weight").notNull(),
     weightMark: word("weight_mark", 20).notNull(),
     oftenMissed: boolean("often_missed").notNull(),
