@@ -26,5 +26,15 @@ export const markedHazards = (keys: readonly string[]): Hazard[] => hazardsOf(ke
 /** The hazards of these keys that stop the work, each once. */
 export const stoppingHazards = (keys: readonly string[]): Hazard[] => hazardsOf([...new Set(keys)]).filter((hazard) => hazard.stop);
 
+/**
+ * What to mind before taking a kind apart: every sentence of the hazards that can kill, then the first of those that all scrap has. What it is
+ * held for has a caution of its own and is left out.
+ */
+export function workCautions(keys: readonly string[], holdUntil: string | null): string[] {
+  const others = hazardsOf(keys).filter((hazard) => holdUntil === null || hazard.record !== holdUntil);
+  const [ofTheTrade, worst] = [others.filter((hazard) => OF_THE_TRADE.has(hazard.key)), others.filter((hazard) => !OF_THE_TRADE.has(hazard.key))];
+  return [...new Set([...worst.flatMap((hazard) => hazard.caution), ...ofTheTrade.flatMap((hazard) => hazard.caution.slice(0, 1))])];
+}
+
 /** The name of a record that must be on file, such as "Refrigerant statement". */
 export const recordName = (key: string): string => records.find((record) => record.key === key)?.name ?? "Record";
