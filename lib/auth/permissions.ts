@@ -39,6 +39,7 @@ export const PERMISSIONS = {
   "prices.change": OFFICE,
   // A sorter: without money.
   "tickets.see": ALL,
+  "tickets.check": ["owner", "bookkeeper", "collector"],
   "tickets.draft": ["owner", "bookkeeper", "collector"],
   "tickets.post": OFFICE,
   "tickets.pay": OFFICE,
