@@ -13,10 +13,9 @@ import { decimalFromMinor, minorFromDecimal } from "@/lib/arithmetic/money";
 import { readTyped, type Money } from "@/lib/tickets/paper";
 import { paymentInputSchema } from "@/lib/tickets/schema";
 import { payTicket } from "./send-ticket";
+import { METHOD_WORDS } from "./words";
 
 type Values = { paidOn: string; amount: string; method: string };
-
-const WORDS = { cash: "Cash", check: "Check", transfer: "Transfer", card: "Card" } as const;
 
 /** Recording what the yard paid: all that is left unless another amount is typed. */
 export function PaymentForm({
@@ -69,7 +68,7 @@ export function PaymentForm({
         name="method"
         size="sm"
         columns={2}
-        options={PAYMENT_METHODS.map((one) => ({ value: one, label: WORDS[one] }))}
+        options={PAYMENT_METHODS.map((one) => ({ value: one, label: METHOD_WORDS[one] }))}
         inputProps={register("method")}
         error={errorAt("method")}
       />

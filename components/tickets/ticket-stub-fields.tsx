@@ -7,6 +7,7 @@ import { Sum } from "@/components/ui/ledger-table";
 import { PAYMENT_METHODS } from "@/db/words";
 import { formatMoney, formatMoneyPlain } from "@/lib/format";
 import type { Money, ReadTicket, TypedTicket } from "@/lib/tickets/paper";
+import { METHOD_WORDS } from "./words";
 
 type Props = {
   read: ReadTicket;
@@ -15,8 +16,6 @@ type Props = {
   register: UseFormRegister<TypedTicket>;
   errorAt: (path: string) => string | undefined;
 };
-
-const METHOD_WORDS: Record<(typeof PAYMENT_METHODS)[number], string> = { cash: "Cash", check: "Check", transfer: "Transfer", card: "Card" };
 
 /** Foot of the paper: how it pays, tax and fees, and the total. */
 export function TicketStubFields({ read, outfit, wrongSums, register, errorAt }: Props) {
