@@ -1,5 +1,6 @@
 import { HazardMark } from "@/components/ui/hazard-mark";
 import { GradeTag } from "@/components/ui/tag";
+import { compare } from "@/lib/arithmetic/decimal";
 import { hazardsOf } from "@/lib/catalogue/hazards";
 import type { SheetPart } from "@/lib/catalogue/schema";
 import { formatWeight } from "@/lib/format";
@@ -15,7 +16,7 @@ function Part({ part, unit }: { part: SheetPart; unit: string }) {
       </div>
       <div className="wt">
         <b className="n">
-          {formatWeight(part.typicalWeight, { places: 2 })}
+          {compare(part.typicalWeight, "0.01") < 0 ? "under 0.01" : formatWeight(part.typicalWeight, { places: 2 })}
           <span className="u">{unit}</span>
         </b>
         <small className="n">{part.perItem === 1 ? "one in each" : `${part.perItem} in each`}</small>

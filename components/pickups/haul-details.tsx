@@ -31,9 +31,9 @@ interface LineProps {
 function WordLine({ id, icon, label, value, most, error, onChange }: LineProps) {
   return (
     <div className="form-row">
-      <label className="haul-line" htmlFor={id}>
+      <div className="haul-line">
         <Icon name={icon} />
-        <span>{label}</span>
+        <label htmlFor={id}>{label}</label>
         <input
           id={id}
           type="text"
@@ -44,7 +44,7 @@ function WordLine({ id, icon, label, value, most, error, onChange }: LineProps) 
           aria-describedby={error ? `${id}-error` : undefined}
           onChange={(event) => onChange(event.target.value)}
         />
-      </label>
+      </div>
       {error ? (
         <p id={`${id}-error`} className="err">
           {error}

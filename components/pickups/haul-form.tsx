@@ -82,12 +82,31 @@ export function HaulForm({ slug, memberId, outfit, today, clock, kinds }: HaulFo
         </div>
       ) : null}
       <div className="body">
-        <ErrorSummary problems={errors.map((error) => (error.path === "" ? { message: error.message } : { field: error.path.split(".")[0], message: error.message }))} />
-        <ChipGroup legend="Where from" hideLegend name="source" options={SOURCES} value={draft.source} onChange={(source) => change(() => ({ source }))} error={errorAt("source")} />
+        <ErrorSummary
+          problems={errors.map((error) => (error.path === "" ? { message: error.message } : { field: error.path.split(".")[0], message: error.message }))}
+        />
+        <ChipGroup
+          legend="Where from"
+          hideLegend
+          name="source"
+          options={SOURCES}
+          value={draft.source}
+          onChange={(source) => change(() => ({ source }))}
+          error={errorAt("source")}
+        />
         <div className="haul-work">
           <HaulTiles kinds={kinds} counts={draft.counts} onCount={(id, count) => change((before) => ({ counts: { ...before.counts, [id]: count } }))} />
-          <HoldCautions kinds={kinds.filter((kind) => (draft.counts[kind.id] ?? 0) > 0)} />
-          <HaulDetails draft={draft} today={today} currency={outfit.currency} currencySymbols={currencySymbols} onChange={(part) => change(() => part)} errorAt={errorAt} />
+          <div className="haul-side">
+            <HoldCautions kinds={kinds.filter((kind) => (draft.counts[kind.id] ?? 0) > 0)} />
+            <HaulDetails
+              draft={draft}
+              today={today}
+              currency={outfit.currency}
+              currencySymbols={currencySymbols}
+              onChange={(part) => change(() => part)}
+              errorAt={errorAt}
+            />
+          </div>
         </div>
       </div>
       <Dock>

@@ -1,7 +1,7 @@
 "use client";
 
 import { useRouter } from "next/navigation";
-import { useRef, useState } from "react";
+import { useRef, useState, useTransition } from "react";
 import { Button } from "@/components/ui/button";
 import { ErrorSummary } from "@/components/ui/error-summary";
 import { Panel } from "@/components/ui/panel";
@@ -44,7 +44,9 @@ export function PickupActions({ slug, id, number, mayWeigh, mayWorkOut, mayVoid,
   const router = useRouter();
   const [asking, setAsking] = useState<Asking>(null);
   const [problem, setProblem] = useState<string | null>(null);
-  const [busy, setBusy] = useState(false);
+  const [sending, setSending] = useState(false);
+  const [refreshing, startRefresh] = useTransition();
+  const busy = sending || refreshing;
   const key = useRef(newId());
   const ask = (next: Asking) => {
     setProblem(null);
@@ -52,20 +54,23 @@ export function PickupActions({ slug, id, number, mayWeigh, mayWorkOut, mayVoid,
   };
   const run = async (act: typeof sendWorkOut) => {
     if (busy) return;
-    setBusy(true);
+    setSending(true);
     setProblem(null);
     try {
       await act(slug, id, key.current);
       key.current = newId();
-      setAsking(null);
-      router.refresh();
+      // The question stands until the page shows the answer, so that nothing can be asked of what is no longer so.
+      startRefresh(() => {
+        router.refresh();
+        setAsking(null);
+      });
     } catch (error) {
       if (!(error instanceof ApiProblem)) throw error;
       // A refusal is an answer, so the next try is new work; without an answer the key stays.
       if (error.problem.status > 0) key.current = newId();
       setProblem(error.problem.detail);
     } finally {
-      setBusy(false);
+      setSending(false);
     }
   };
   if (!mayWeigh && !mayWorkOut && !mayVoid) return null;
@@ -81,7 +86,11 @@ export function PickupActions({ slug, id, number, mayWeigh, mayWorkOut, mayVoid,
               <Button variant="line" onClick={() => ask(null)}>
                 {question.keep}
               </Button>
-              <Button variant={asking === "void" ? "danger" : "filled"} aria-busy={busy} onClick={() => void run(asking === "void" ? sendPickupVoid : sendWorkOut)}>
+              <Button
+                variant={asking === "void" ? "danger" : "filled"}
+                aria-busy={busy}
+                onClick={() => void run(asking === "void" ? sendPickupVoid : sendWorkOut)}
+              >
                 {question.go}
               </Button>
             </div>

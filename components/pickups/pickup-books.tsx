@@ -28,9 +28,7 @@ function RecordList<T extends Line>({ lines, idOf, name, figure, today }: Record
         const [first] = own;
         return (
           <li key={id}>
-            <h3>
-              {first ? `${headOf(first)}, ${formatDate(first.occurredOn, { today })}` : null}
-            </h3>
+            <h3>{first ? `${headOf(first)}, ${formatDate(first.occurredOn, { today })}` : null}</h3>
             <dl>
               {own.map((line, index) => (
                 <div key={index} className="contents">
@@ -60,14 +58,26 @@ export function PickupBooks({ weight, money, unit, currency, today }: PickupBook
   return (
     <>
       <Panel title="In the weight book" sub={unit} padded>
-        <RecordList lines={weight} idOf={(line) => line.movementId} name={(line) => line.place} figure={(line) => formatWeight(line.quantity, { sign: true })} today={today} />
+        <RecordList
+          lines={weight}
+          idOf={(line) => line.movementId}
+          name={(line) => line.place}
+          figure={(line) => formatWeight(line.quantity, { sign: true })}
+          today={today}
+        />
       </Panel>
       {money === null ? null : (
         <Panel title="In the money book" sub={currency} padded>
           {money.length === 0 ? (
             <p>Nothing was paid for it, so the money book has no record.</p>
           ) : (
-            <RecordList lines={money} idOf={(line) => line.entryId} name={(line) => line.account} figure={(line) => formatMoney(line.amountMinor, currency, { sign: true })} today={today} />
+            <RecordList
+              lines={money}
+              idOf={(line) => line.entryId}
+              name={(line) => line.account}
+              figure={(line) => formatMoney(line.amountMinor, currency, { sign: true })}
+              today={today}
+            />
           )}
         </Panel>
       )}

@@ -13,7 +13,7 @@ export function PickupFigures({ pickup, unit, currency }: { pickup: PickupRecord
     </>
   );
   return (
-    <dl className="key">
+    <dl className="key haul-figures">
       <div>
         <dt>Estimate</dt>
         <dd>
@@ -37,7 +37,9 @@ export function PickupFigures({ pickup, unit, currency }: { pickup: PickupRecord
           <dt>Paid{pickup.paidMinor > 0 && pickup.paidFrom !== null ? `, from ${PAID_FROM_NAME[pickup.paidFrom].toLowerCase()}` : ""}</dt>
           <dd>
             <b className="n">{formatMoney(pickup.paidMinor, currency)}</b>
-            {pickup.remainingCostMinor !== null && pickup.paidMinor > 0 ? <em className="n">{formatMoney(pickup.remainingCostMinor, currency)} still in the pile</em> : null}
+            {pickup.remainingCostMinor !== null && pickup.remainingCostMinor > 0 ? (
+              <em className="n">{formatMoney(pickup.remainingCostMinor, currency)} still in the pile</em>
+            ) : null}
           </dd>
         </div>
       )}

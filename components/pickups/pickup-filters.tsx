@@ -28,14 +28,17 @@ export function PickupFilters({ slug, view, from, to, today }: PickupFiltersProp
           </Link>
         ))}
       </nav>
-      <form method="get" action={`/o/${slug}/pickups`}>
-        <input type="hidden" name="state" value={view} />
-        <TextField id="from" name="from" label="From" type="date" max={today} defaultValue={from} />
-        <TextField id="to" name="to" label="To" type="date" max={today} defaultValue={to} />
-        <Button type="submit" variant="line">
-          Show days
-        </Button>
-      </form>
+      <details open={from !== undefined || to !== undefined}>
+        <summary>{from !== undefined || to !== undefined ? "Days chosen" : "Choose days"}</summary>
+        <form method="get" action={`/o/${slug}/pickups`}>
+          <input type="hidden" name="state" value={view} />
+          <TextField id="from" name="from" label="From" type="date" max={today} defaultValue={from} />
+          <TextField id="to" name="to" label="To" type="date" max={today} defaultValue={to} />
+          <Button type="submit" variant="line">
+            Show days
+          </Button>
+        </form>
+      </details>
     </div>
   );
 }

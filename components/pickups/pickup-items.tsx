@@ -15,7 +15,6 @@ export function PickupItems({ slug, pickup, unit }: { slug: string; pickup: Pick
         <thead>
           <tr>
             <Th>Item kind</Th>
-            <Th>Mind</Th>
             <Th numeric>Count</Th>
             <Th numeric unit={unit}>
               Estimate
@@ -27,17 +26,15 @@ export function PickupItems({ slug, pickup, unit }: { slug: string; pickup: Pick
             const hazards = markedHazards(item.hazards);
             return (
               <tr key={item.line}>
-                <RowHead>
+                <RowHead className="item-name">
                   <Link href={`/o/${slug}/bench/sheets/${item.itemKindId}`}>{item.name}</Link>
-                </RowHead>
-                <Td className="wrap">
                   {hazards.length === 0 ? null : (
-                    <span className="inline-flex items-center gap-2">
-                      <HazardMark />
+                    <span className="item-mind">
+                      <HazardMark label="Hazard" />
                       {hazards.map((hazard) => hazard.title).join(", ")}
                     </span>
                   )}
-                </Td>
+                </RowHead>
                 <Td numeric>{item.count}</Td>
                 <Td numeric>
                   {formatWeight(item.estimatedWeight)}
@@ -49,9 +46,7 @@ export function PickupItems({ slug, pickup, unit }: { slug: string; pickup: Pick
         </tbody>
         <tfoot>
           <tr>
-            <th scope="row" colSpan={2}>
-              All items
-            </th>
+            <th scope="row">All items</th>
             <Td numeric>
               <Sum>{pickup.itemCount}</Sum>
             </Td>

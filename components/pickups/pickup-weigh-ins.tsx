@@ -11,9 +11,13 @@ export function PickupWeighIns({ slug, pickup, unit, today }: { slug: string; pi
   if (pickup.weighIns.length === 0) {
     return (
       <Panel title="Weighed from it">
-        <EmptyState level={3} title="Nothing weighed from this haul yet">
-          {pickup.state === "open" ? "Take it apart, then weigh each grade into its bin." : "Nothing was weighed into a bin from it."}
-        </EmptyState>
+        {pickup.state === "open" ? (
+          <EmptyState level={3} title="Nothing weighed from this haul yet">
+            Take it apart, then weigh each grade into its bin.
+          </EmptyState>
+        ) : (
+          <EmptyState level={3} title="Nothing was weighed from this haul" />
+        )}
       </Panel>
     );
   }

@@ -71,7 +71,8 @@ export async function changeGrade(ctx: Context, id: string, change: GradeChange)
     const where = and(eq(grades.outfitId, ctx.outfit.id), eq(grades.id, id));
     await tx.select({ id: grades.id }).from(grades).where(where).for("update");
     const before = await requireGrade(tx, ctx, id);
-    if (before.version !== ctx.ifMatch) throw new AppError("stale", "Somebody changed this grade first. Look at it again, then change it.", { current: before });
+    if (before.version !== ctx.ifMatch)
+      throw new AppError("stale", "Somebody changed this grade first. Look at it again, then change it.", { current: before });
     try {
       await tx
         .update(grades)

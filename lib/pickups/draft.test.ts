@@ -14,7 +14,8 @@ const draft = { ...freshDraft("018f2d5e-0000-7000-8000-0000000000aa", "visit"), 
 describe("a haul kept on the device", () => {
   it("comes back as it was kept, and what is no draft comes back as nothing", () => {
     expect(readDraft(JSON.stringify(draft))).toEqual(draft);
-    for (const text of [null, "", "{", "[]", JSON.stringify({ ...draft, counts: { [VAC]: -1 } }), JSON.stringify({ ...draft, source: "street" })]) expect(readDraft(text)).toBeNull();
+    for (const text of [null, "", "{", "[]", JSON.stringify({ ...draft, counts: { [VAC]: -1 } }), JSON.stringify({ ...draft, source: "street" })])
+      expect(readDraft(text)).toBeNull();
   });
 
   it("holds work as soon as anything is counted or typed", () => {
@@ -50,9 +51,18 @@ describe("a haul kept on the device", () => {
     expect(earlier.ok && earlier.input.paidMinor).toBe(0);
   });
 
+  it("asks only for items when nothing was done yet", () => {
+    const reading = readHaul(freshDraft("", ""), kinds, "2026-03-05", dollars);
+    const parsed = pickupInputSchema.safeParse(reading.ok ? reading.input : null);
+    expect(parsed.error?.issues.map((issue) => issue.message)).toEqual(["Count one item or more."]);
+  });
+
   it("says what is wrong with an amount that cannot be read", () => {
     for (const paid of ["twelve", "-5", "12.505", "1,23,4", "5 lb"]) {
-      expect(readHaul({ ...draft, paid }, kinds, "2026-03-05", dollars)).toEqual({ ok: false, errors: [{ path: "paidMinor", message: "Paid must be an amount, like 25 or 12.50." }] });
+      expect(readHaul({ ...draft, paid }, kinds, "2026-03-05", dollars)).toEqual({
+        ok: false,
+        errors: [{ path: "paidMinor", message: "Paid must be an amount, like 25 or 12.50." }],
+      });
     }
   });
 });

@@ -87,7 +87,8 @@ export function readHaul(draft: HaulDraft, kinds: { id: string }[], today: strin
   return {
     ok: true,
     input: {
-      id: draft.id,
+      // A haul that nothing was done to has no id yet.
+      ...(draft.id === "" ? {} : { id: draft.id }),
       pickedUpOn: draft.pickedUpOn ?? today,
       source: draft.source,
       place: draft.place,

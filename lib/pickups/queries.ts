@@ -1,7 +1,22 @@
 import "server-only";
 import { and, asc, count, desc, eq, gte, inArray, isNull, lt, lte, ne, or, sql } from "drizzle-orm";
 import type { Reader } from "@/db/client";
-import { bins, entries, grades, itemKinds, lots, memberships, movementLines, movements, pickupItems, pickups, postings, users, weighIns, accounts } from "@/db/schema";
+import {
+  bins,
+  entries,
+  grades,
+  itemKinds,
+  lots,
+  memberships,
+  movementLines,
+  movements,
+  pickupItems,
+  pickups,
+  postings,
+  users,
+  weighIns,
+  accounts,
+} from "@/db/schema";
 import { add, trim } from "@/lib/arithmetic/decimal";
 import type { Actor, Outfit } from "@/lib/auth/context";
 import { seesCost } from "@/lib/auth/permissions";
@@ -192,7 +207,12 @@ export async function outputsOf(db: Reader, { outfitId, pickupId }: { outfitId: 
       ),
     )
     .orderBy(asc(weighIns.id));
-  const byGrade = totalsBy([...weighed, ...drawn], (row) => row.gradeId, (row) => row.net, add);
+  const byGrade = totalsBy(
+    [...weighed, ...drawn],
+    (row) => row.gradeId,
+    (row) => row.net,
+    add,
+  );
   return [...byGrade].map(([gradeId, net]) => ({ gradeId, net }));
 }
 

@@ -74,7 +74,8 @@ describe("working a haul out", () => {
 
 describe("who sees and who may take back", () => {
   it("shows what was paid to the office and to the collector who paid it, unless money is hidden", () => {
-    const sees = (hidesMoney: boolean) => ROLES.map((role) => [role, seesPaid({ id: "me", role }, { hidesMoney }, "me"), seesPaid({ id: "me", role }, { hidesMoney }, "other")]);
+    const sees = (hidesMoney: boolean) =>
+      ROLES.map((role) => [role, seesPaid({ id: "me", role }, { hidesMoney }, "me"), seesPaid({ id: "me", role }, { hidesMoney }, "other")]);
     expect(sees(false)).toEqual([
       ["owner", true, true],
       ["bookkeeper", true, true],

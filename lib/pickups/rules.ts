@@ -45,14 +45,12 @@ export type Output = { gradeId: string; net: DecimalString; price: DecimalString
 export function workOutBooking(lot: { pickupId: string; remainingWeight: DecimalString; remainingCostMinor: number; outputs: Output[] }): BookSides {
   const { pickupId, remainingWeight, remainingCostMinor, outputs } = lot;
   const shares = outputs.length === 0 ? [] : jointCost(remainingCostMinor, outputs);
-  const taken = outputs.map(
-    ({ gradeId, held }, index): Posting => ({
-      account: isZero(held) ? "cost-of-scrap-sold" : "scrap-stock",
-      amountMinor: shares[index] ?? 0,
-      gradeId,
-      pickupId,
-    }),
-  );
+  const taken = outputs.map(({ gradeId, held }, index): Posting => ({
+    account: isZero(held) ? "cost-of-scrap-sold" : "scrap-stock",
+    amountMinor: shares[index] ?? 0,
+    gradeId,
+    pickupId,
+  }));
   const loss: Posting = { account: "stock-loss", amountMinor: remainingCostMinor, pickupId };
   return {
     lines: [
@@ -74,4 +72,3 @@ export function whyNotVoid(member: { id: string; role: Role }, pickup: { madeBy:
   if (pickup.state === "worked-out") return "This haul is worked out. Ask the owner to void it.";
   return null;
 }
-

@@ -34,7 +34,10 @@ export const pickupListQuery = z
     from: dateField("From").optional(),
     to: dateField("To").optional(),
   })
-  .refine((query) => query.from === undefined || query.to === undefined || query.from <= query.to, { path: ["to"], error: "To must be the same day as From, or later." });
+  .refine((query) => query.from === undefined || query.to === undefined || query.from <= query.to, {
+    path: ["to"],
+    error: "To must be the same day as From, or later.",
+  });
 
 const personSchema = z.object({ id: z.string(), name: z.string() });
 

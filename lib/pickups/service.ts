@@ -44,11 +44,17 @@ async function estimated(tx: Transaction, ctx: Context, items: PickupInput["item
       ),
     );
   const typical = new Map(kinds.map((kind) => [kind.id, kind.typicalWeight]));
-  const unknown = items.flatMap((item, index) => (typical.has(item.itemKindId) ? [] : [{ path: `items.${index}.itemKindId`, message: "There is no such item kind here." }]));
+  const unknown = items.flatMap((item, index) =>
+    typical.has(item.itemKindId) ? [] : [{ path: `items.${index}.itemKindId`, message: "There is no such item kind here." }],
+  );
   if (unknown.length > 0) throw new AppError("input", "There is no such item kind here.", { errors: unknown });
   return items.map((item) => ({
     ...item,
-    estimate: lineEstimate({ count: item.count, typicalWeight: typical.get(item.itemKindId) ?? "0", ...(item.weight === undefined ? {} : { weighed: item.weight }) }),
+    estimate: lineEstimate({
+      count: item.count,
+      typicalWeight: typical.get(item.itemKindId) ?? "0",
+      ...(item.weight === undefined ? {} : { weighed: item.weight }),
+    }),
   }));
 }
 

@@ -118,7 +118,12 @@ describe("item kinds", () => {
     const { body } = await call<Page<ItemKind>>(kinds.GET, outfit, { key: outfit.keys.sorter });
     const catalogue = [...first, ...second];
     expect(body.items.map((kind) => kind.key)).toEqual(catalogue.map((kind) => kind.key));
-    expect(body.items.find((kind) => kind.key === "refrigerator")).toMatchObject({ tileName: "Refrigerator", group: "cooling & heating", typicalWeight: "185", holdUntil: "refrigerant-statement" });
+    expect(body.items.find((kind) => kind.key === "refrigerator")).toMatchObject({
+      tileName: "Refrigerator",
+      group: "cooling & heating",
+      typicalWeight: "185",
+      holdUntil: "refrigerant-statement",
+    });
     expect(body.items.map((kind) => kind.hazards)).toEqual(catalogue.map((kind) => kind.hazards));
   });
 
@@ -127,7 +132,11 @@ describe("item kinds", () => {
     const { body } = await call<ItemKindSheet>(oneKind.GET, outfit, { key: outfit.keys.sorter, params: { id } });
     const seed = first.find((kind) => kind.key === "upright-vacuum");
     expect(body.parts.map((part) => part.key)).toEqual(seed?.parts.map((part) => part.key));
-    expect(body.parts[0]).toMatchObject({ where: seed?.parts[0]?.where, grade: { key: seed?.parts[0]?.grade, id: outfit.grade(seed?.parts[0]?.grade ?? "") }, oftenMissed: seed?.parts[0]?.oftenMissed });
+    expect(body.parts[0]).toMatchObject({
+      where: seed?.parts[0]?.where,
+      grade: { key: seed?.parts[0]?.grade, id: outfit.grade(seed?.parts[0]?.grade ?? "") },
+      oftenMissed: seed?.parts[0]?.oftenMissed,
+    });
     expect(body.parts.every((part) => part.grade.id !== null)).toBe(true);
   });
 

@@ -13,8 +13,14 @@ export async function booksOf(outfitId: string) {
   const stock = await db.select().from(gradeStock).where(eq(gradeStock.outfitId, outfitId));
   return {
     accounts: Object.fromEntries(accounts.filter((row) => row.balanceMinor !== 0).map((row) => [row.account, row.balanceMinor])),
-    lots: pile.filter((row) => !isZero(row.remainingWeight) || row.remainingCostMinor !== 0).map((row) => ({ pickupId: row.pickupId, weight: trim(row.remainingWeight), costMinor: row.remainingCostMinor })),
-    stock: Object.fromEntries(stock.filter((row) => !isZero(row.quantity) || row.costMinor !== 0).map((row) => [row.gradeId, { quantity: trim(row.quantity), costMinor: row.costMinor }])),
+    lots: pile
+      .filter((row) => !isZero(row.remainingWeight) || row.remainingCostMinor !== 0)
+      .map((row) => ({ pickupId: row.pickupId, weight: trim(row.remainingWeight), costMinor: row.remainingCostMinor })),
+    stock: Object.fromEntries(
+      stock
+        .filter((row) => !isZero(row.quantity) || row.costMinor !== 0)
+        .map((row) => [row.gradeId, { quantity: trim(row.quantity), costMinor: row.costMinor }]),
+    ),
   };
 }
 

@@ -28,7 +28,14 @@ describe("the list of pickups", () => {
   it("is newest first and says what each holds, without money for those who may not see it", async () => {
     const { body } = await list();
     expect(days(body)).toEqual(["2026-01-05", "2026-01-03", "2026-01-02", "2026-01-02", "2026-01-01"]);
-    expect(body.items[1]).toMatchObject({ state: "open", kinds: [{ name: "Printer", count: 1 }], estimatedWeight: "22.75", remainingWeight: "22.75", paidMinor: null, paidFrom: null });
+    expect(body.items[1]).toMatchObject({
+      state: "open",
+      kinds: [{ name: "Printer", count: 1 }],
+      estimatedWeight: "22.75",
+      remainingWeight: "22.75",
+      paidMinor: null,
+      paidFrom: null,
+    });
     expect(body.items[0]).toMatchObject({ state: "void", remainingWeight: "0" });
   });
 

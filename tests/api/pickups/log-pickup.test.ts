@@ -50,7 +50,15 @@ describe("logging a haul", () => {
     const answer = await log(haul());
     expect(answer.status, JSON.stringify(answer.body)).toBe(201);
     // 2 x 15.5 and 3 x 36.02.
-    expect(answer.body).toMatchObject({ number: 1, state: "open", itemCount: 5, estimatedWeight: "139.06", remainingWeight: "139.06", paidMinor: 0, version: 1 });
+    expect(answer.body).toMatchObject({
+      number: 1,
+      state: "open",
+      itemCount: 5,
+      estimatedWeight: "139.06",
+      remainingWeight: "139.06",
+      paidMinor: 0,
+      version: 1,
+    });
     expect(answer.body.items.map((item) => [item.name, item.count, item.estimatedWeight])).toEqual([
       ["Upright vacuum", 2, "31"],
       ["Microwave oven", 3, "108.06"],
@@ -65,7 +73,14 @@ describe("logging a haul", () => {
 
   it("keeps two lines of one kind as two lines and lists the kind once", async () => {
     const itemKindId = outfit.kind("box-fan");
-    const answer = await log(haul({ items: [{ itemKindId, count: 2 }, { itemKindId, count: 1, weight: "9.25" }] }));
+    const answer = await log(
+      haul({
+        items: [
+          { itemKindId, count: 2 },
+          { itemKindId, count: 1, weight: "9.25" },
+        ],
+      }),
+    );
     expect(answer.body.items.map((item) => item.estimatedWeight)).toEqual(["16", "9.25"]);
     expect(answer.body.kinds).toEqual([{ itemKindId, name: "Box fan", plural: "Box fans", count: 3 }]);
   });
@@ -152,7 +167,16 @@ describe("what is refused, with the field named and nothing booked", () => {
     ["a weight with five decimals", "items.0.weight", () => ({ items: [{ itemKindId: vacuum(), count: 1, weight: "1.23456" }] })],
     ["a weight as a number", "items.0.weight", () => ({ items: [{ itemKindId: vacuum(), count: 1, weight: 3 }] })],
     ["NaN as a weight", "items.0.weight", () => ({ items: [{ itemKindId: vacuum(), count: 1, weight: "NaN" }] })],
-    ["an item kind that nobody has", "items.1.itemKindId", () => ({ items: [{ itemKindId: vacuum(), count: 1 }, { itemKindId: newId(), count: 1 }] })],
+    [
+      "an item kind that nobody has",
+      "items.1.itemKindId",
+      () => ({
+        items: [
+          { itemKindId: vacuum(), count: 1 },
+          { itemKindId: newId(), count: 1 },
+        ],
+      }),
+    ],
     ["words for an item kind", "items.0.itemKindId", () => ({ items: [{ itemKindId: "fridge", count: 1 }] })],
     ["a field that is not there", "items.0.grade", () => ({ items: [{ itemKindId: vacuum(), count: 1, grade: "copper" }] })],
     ["a day that lies ahead", "pickedUpOn", () => ({ pickedUpOn: addDays(today(), 1) })],

@@ -47,7 +47,11 @@ const weigh = (binId: string, net: string, more: Record<string, unknown>) => mak
 
 async function sheet(lines: Record<string, string>): Promise<void> {
   const yardId = await make(yards.POST, { name: "Northgate Metals" });
-  await make(sheets.POST, { yardId, inForceFrom: "2026-01-02", lines: Object.entries(lines).map(([grade, price]) => ({ gradeId: outfit.grade(grade), price, per: "lb" })) });
+  await make(sheets.POST, {
+    yardId,
+    inForceFrom: "2026-01-02",
+    lines: Object.entries(lines).map(([grade, price]) => ({ gradeId: outfit.grade(grade), price, per: "lb" })),
+  });
 }
 
 describe("working a haul out", () => {
@@ -136,8 +140,15 @@ describe("a weigh-in of a worked-out haul that is taken back", () => {
     const mistaken = await weigh(wrong, "10", { pickupId: id });
     await act(workOut.POST, id);
     expect((await act(weighInVoid.POST, mistaken)).status).toBe(200);
-    expect((await call<PickupRecord>(onePickup.GET, outfit, { key: outfit.keys.owner, params: { id } })).body).toMatchObject({ state: "open", remainingWeight: "108.06" });
-    expect(await booksOf(outfit.id)).toEqual({ accounts: { cash: -10_806, "scrap-stock": 10_806 }, lots: [{ pickupId: id, weight: "108.06", costMinor: 10_806 }], stock: {} });
+    expect((await call<PickupRecord>(onePickup.GET, outfit, { key: outfit.keys.owner, params: { id } })).body).toMatchObject({
+      state: "open",
+      remainingWeight: "108.06",
+    });
+    expect(await booksOf(outfit.id)).toEqual({
+      accounts: { cash: -10_806, "scrap-stock": 10_806 },
+      lots: [{ pickupId: id, weight: "108.06", costMinor: 10_806 }],
+      stock: {},
+    });
     await weigh(right, "10", { pickupId: id });
     await act(workOut.POST, id);
     expect((await booksOf(outfit.id)).stock).toEqual({ [outfit.grade("no2-copper")]: { quantity: "10", costMinor: 10_806 } });

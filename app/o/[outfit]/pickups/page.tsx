@@ -57,7 +57,9 @@ export default async function PickupsPage({ params, searchParams }: { params: Pr
       {page === null || page.items.length === 0 ? (
         <Panel>
           <EmptyState title={NOTHING[view]} actions={newHaul}>
-            {view === "open" ? "A haul stays open until everything in it is weighed or written off. Log the next one at the curb." : "Choose another state or other days above."}
+            {view === "open"
+              ? "A haul stays open until everything in it is weighed or written off. Log the next one at the curb."
+              : "Choose another state or other days above."}
           </EmptyState>
         </Panel>
       ) : (

@@ -46,32 +46,40 @@ export default async function PickupPage({ params, searchParams }: Props) {
   const open = pickup.state === "open";
   const mayWeigh = open && can(member.role, "weigh-ins.make");
   return (
-    <div className="page">
+    <div className="page aside">
       <PageHead title={`Pickup ${pickup.number}`} fact={factOf(pickup, ctx.today)} />
       {(await searchParams).saved === "now" && pickup.state !== "void" ? (
-        <p className="notice" role="status">
+        <p className="notice full" role="status">
           {bookedWords(pickup, ctx)}
         </p>
       ) : null}
-      <PickupActions
-        slug={slug}
-        id={pickup.id}
-        number={pickup.number}
-        mayWeigh={mayWeigh}
-        mayWorkOut={mayWeigh}
-        mayVoid={pickup.state !== "void" && can(member.role, "pickups.change") && whyNotVoid(member, { madeBy: pickup.madeBy.id, state: pickup.state }) === null}
-        left={formatWeightUnit(pickup.remainingWeight, weightUnit)}
-      />
-      <PickupFigures pickup={pickup} unit={weightUnit} currency={currency} />
-      {open ? <HoldCautions kinds={pickup.items} /> : null}
-      <PickupItems slug={slug} pickup={pickup} unit={weightUnit} />
-      {pickup.note === null ? null : (
-        <Panel title="Note" padded>
-          <p className="whitespace-pre-wrap">{pickup.note}</p>
-        </Panel>
-      )}
-      <PickupWeighIns slug={slug} pickup={pickup} unit={weightUnit} today={ctx.today} />
-      <PickupBooks weight={weight} money={money} unit={weightUnit} currency={currency} today={ctx.today} />
+      <div className="full grid grid-cols-[minmax(0,1fr)] gap-4">
+        <PickupActions
+          slug={slug}
+          id={pickup.id}
+          number={pickup.number}
+          mayWeigh={mayWeigh}
+          mayWorkOut={mayWeigh}
+          mayVoid={
+            pickup.state !== "void" && can(member.role, "pickups.change") && whyNotVoid(member, { madeBy: pickup.madeBy.id, state: pickup.state }) === null
+          }
+          left={formatWeightUnit(pickup.remainingWeight, weightUnit)}
+        />
+        <PickupFigures pickup={pickup} unit={weightUnit} currency={currency} />
+      </div>
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
+        {open ? <HoldCautions kinds={pickup.items} /> : null}
+        <PickupItems slug={slug} pickup={pickup} unit={weightUnit} />
+        <PickupWeighIns slug={slug} pickup={pickup} unit={weightUnit} today={ctx.today} />
+      </div>
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
+        {pickup.note === null ? null : (
+          <Panel title="Note" padded>
+            <p className="whitespace-pre-wrap">{pickup.note}</p>
+          </Panel>
+        )}
+        <PickupBooks weight={weight} money={money} unit={weightUnit} currency={currency} today={ctx.today} />
+      </div>
     </div>
   );
 }

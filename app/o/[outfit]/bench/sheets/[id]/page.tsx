@@ -23,7 +23,11 @@ export default async function SheetPage({ params }: { params: Promise<{ outfit: 
   const missed = kind.parts.filter((part) => part.oftenMissed).length;
   return (
     <div className="phone sheet-page">
-      <PhoneBar back={{ href: `/o/${slug}/bench`, label: "Back to bench" }} title={kind.name} fact={kind.minutes === null ? undefined : `${kind.minutes} min`} />
+      <PhoneBar
+        back={{ href: `/o/${slug}/bench`, label: "Back to bench" }}
+        title={kind.name}
+        fact={kind.minutes === null ? undefined : `${kind.minutes} min`}
+      />
       <div className="body">
         <p className="sheet-item">
           <b>One {kind.name.toLowerCase()}</b>
@@ -35,7 +39,9 @@ export default async function SheetPage({ params }: { params: Promise<{ outfit: 
         {cautions.length === 0 ? null : <Caution title="Before the cover comes off" lines={cautions} />}
         <h2 className="flex items-baseline justify-between pt-2">
           Parts
-          <small className="n text-ink-2 font-medium">{missed === 0 ? `${kind.parts.length} parts` : `${kind.parts.length} parts, ${missed} often missed`}</small>
+          <small className="n text-ink-2 font-medium">
+            {missed === 0 ? `${kind.parts.length} parts` : `${kind.parts.length} parts, ${missed} often missed`}
+          </small>
         </h2>
         <SheetParts parts={kind.parts} unit={unit} />
       </div>
