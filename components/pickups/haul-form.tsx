@@ -34,6 +34,12 @@ interface HaulFormProps {
 
 const SOURCES = PICKUP_SOURCES.map((value) => ({ value, label: SOURCE_NAME[value] }));
 
+/** The signs that may be typed with an amount: "$" and "USD". */
+function symbolsOf(currency: string): string[] {
+  const parts = new Intl.NumberFormat("en-US", { style: "currency", currency, currencyDisplay: "narrowSymbol" }).formatToParts(0);
+  return [...parts.filter((part) => part.type === "currency").map((part) => part.value), currency];
+}
+
 /** Logging a curbside haul: tap what was found, save. Every tap is kept on the device until the ledger has it. */
 export function HaulForm({ slug, memberId, outfit, today, clock, kinds }: HaulFormProps) {
   const router = useRouter();
@@ -49,7 +55,7 @@ export function HaulForm({ slug, memberId, outfit, today, clock, kinds }: HaulFo
       router.refresh();
     },
   });
-  const currencySymbols = outfit.currency === "USD" || outfit.currency === "CAD" ? ["$", outfit.currency] : [outfit.currency];
+  const currencySymbols = symbolsOf(outfit.currency);
   const totals = haulTotals(draft.counts, kinds);
   const about = `${itemsInWords(totals.items)}, about ${formatWeightUnit(totals.weight, outfit.weightUnit, { places: 0 })}`;
   const save = () => {
