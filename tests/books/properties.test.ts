@@ -88,7 +88,8 @@ class Run {
       expect(repeat.body).toEqual(first.body);
     }
     expect(first.status, JSON.stringify(first.body)).toBeLessThan(500);
-    return first;
+    // A refusal keeps no answer, so of two at once the second may find the books changed and be let in.
+    return repeat && first.status >= 300 ? repeat : first;
   }
 
   private choose<T>(list: T[], pick: number): T | undefined {
