@@ -7,3 +7,8 @@ export function percent(share: number): string {
 export function px(value: number): number {
   return Math.round(value * 100) / 100;
 }
+
+/** A weight or amount as a number to draw with. What is written beside the mark comes from the exact text. */
+export function forDrawing(value: string): number {
+  return Number.parseFloat(value);
+}
