@@ -190,7 +190,15 @@ export function publicRoute<Q extends Schema | undefined = undefined, B extends 
   definition: Shape<Q, B, R> & {
     permission: "public";
     limit: typeof PUBLIC_READ;
-    handler: (input: { params: Record<string, string>; query: Output<Q>; body: Output<B>; requestId: string; now: Date }) => Promise<z.input<R>>;
+    /** `person` is who is signed in, if anybody: most public routes do not care. */
+    handler: (input: {
+      person: Person | null;
+      params: Record<string, string>;
+      query: Output<Q>;
+      body: Output<B>;
+      requestId: string;
+      now: Date;
+    }) => Promise<z.input<R>>;
   },
 ): RouteHandler {
   const { permission, query, body, response, status = 200, summary, limit } = definition;
@@ -199,10 +207,11 @@ export function publicRoute<Q extends Schema | undefined = undefined, B extends 
     try {
       requireOwnOrigin(request);
       await takePoint(limit, addressOf(request));
+      const person = await personOf(request);
       const params = await paramsOf(context);
       const parsedQuery = query ? parse(query, queryOf(request)) : undefined;
       const parsedBody = body ? parse(body, await readJson(request)) : undefined;
-      const result = await definition.handler({ params, query: parsedQuery as Output<Q>, body: parsedBody as Output<B>, requestId, now: now() });
+      const result = await definition.handler({ person, params, query: parsedQuery as Output<Q>, body: parsedBody as Output<B>, requestId, now: now() });
       return answered(result, response, status, requestId, false);
     } catch (error) {
       return failed(error, request, requestId);

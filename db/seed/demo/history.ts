@@ -17,8 +17,7 @@ export type Happening =
   | { what: "work-out"; pickup: number }
   | { what: "count"; bin: string; lossHundredths: number }
   | { what: "sale"; yard: number; number: string; grades: string[]; payAfter: number | null; short: boolean }
-  | { what: "cost"; kind: (typeof COSTS)[number]["kind"]; amountMinor: number; note: string }
-  | { what: "payments"; sale: string };
+  | { what: "cost"; kind: (typeof COSTS)[number]["kind"]; amountMinor: number; note: string };
 
 export type Day = { on: string; happenings: Happening[] };
 
