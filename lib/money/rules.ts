@@ -1,5 +1,6 @@
 import { add, divide, isPositive, isZero, sum, trim, type DecimalString } from "@/lib/arithmetic/decimal";
-import { addMinor, decimalFromMinor } from "@/lib/arithmetic/money";
+import { addMinor, decimalFromMinor, minorFromDecimal } from "@/lib/arithmetic/money";
+import { readNumber } from "@/lib/arithmetic/read-number";
 import { whyItChanged, type SalesByGrade } from "@/lib/arithmetic/why";
 import { PAYING_ACCOUNT } from "@/lib/books/accounts";
 import type { Posting } from "@/lib/books/booking";
@@ -114,4 +115,10 @@ export function netEffects({ netMinor, costOfScrapMinor, costsMinor, why, before
   const scrapMinor = addMinor(before.costOfScrapMinor, -costOfScrapMinor);
   const runningMinor = addMinor(before.costsMinor, -costsMinor);
   return { changeMinor, scrapMinor, runningMinor, otherMinor: addMinor(changeMinor, -why.changeMinor, -scrapMinor, -runningMinor) };
+}
+
+/** An amount as it is typed, in minor units; null when it is no amount of money that could be booked. */
+export function readAmount(text: string, { exponent, currencySymbols }: { exponent: number; currencySymbols: string[] }): number | null {
+  const read = readNumber(text, { locale: "en-US", currencySymbols });
+  return read.ok && /^\d{1,11}(\.\d+)?$/.test(read.value) ? minorFromDecimal(read.value, exponent) : null;
 }
