@@ -47,10 +47,8 @@ const NEVER: unknown[] = [
   "'; drop table grades; --",
 ];
 
-/** Values of the list above that a field may truly take, by the end of its path. */
-const FINE: Record<string, (value: unknown) => boolean> = {
-  binId: () => false,
-};
+/** A price may have up to six decimals, so the five of the list above are fine in one. */
+const isFine = (path: string, value: unknown) => path.endsWith("price") && value === "1.23456";
 
 type Json = Record<string, unknown>;
 type Case = { name: string; handler: RouteHandler; body: () => Json };
@@ -175,7 +173,7 @@ describe.each(CASES)("POST /$name", ({ handler, body }) => {
       const at = path.join(".");
       const good = path.reduce<unknown>((inner, key) => (inner as Json)[key], body());
       for (const value of NEVER) {
-        if (value === good || FINE[at]?.(value)) continue;
+        if (value === good || isFine(at, value)) continue;
         const before = await booked(outfit.id);
         const answer = await call(handler, outfit, { key: outfit.keys.owner, body: withValue(body(), path, value) });
         const told = `${at} = ${JSON.stringify(value)?.slice(0, 40)}: ${answer.status} ${JSON.stringify(answer.body).slice(0, 300)}`;
