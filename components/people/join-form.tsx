@@ -1,6 +1,7 @@
 "use client";
 
 import Link from "next/link";
+import { useRouter } from "next/navigation";
 import { useForm } from "react-hook-form";
 import { useApiForm } from "@/components/forms/use-api-form";
 import { BigButton } from "@/components/ui/button";
@@ -18,13 +19,14 @@ type Props = { token: string; outfitName: string; role: Role; inviter: string; p
 
 /** Joining an outfit by a link: one tap for somebody who is signed in, three fields for somebody new. */
 export function JoinForm({ token, outfitName, role, inviter, person }: Props) {
+  const router = useRouter();
   const { register, handleSubmit, getValues } = useForm<Values>({ defaultValues: { name: "", email: "", password: "" }, shouldFocusError: false });
   const { submit, sending, errors, errorAt } = useApiForm<typeof acceptSchema, { slug: string }>({
     schema: acceptSchema,
     send: (input) => apiSend(`/api/invitations/${token}/accept`, { body: input }),
     onDone: async ({ slug }) => {
       if (!person) await signInWithPassword(getValues("email"), getValues("password"));
-      window.location.assign(`/o/${slug}`);
+      router.push(`/o/${slug}`);
     },
   });
   const error = (path: string) => {

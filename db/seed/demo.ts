@@ -37,9 +37,7 @@ async function makeOutfit(moment: Date) {
   for (const [role, person] of people) {
     if (role === "owner") continue;
     const id = newId();
-    await database()
-      .insert(memberships)
-      .values({ outfitId: made.id, id, userId: person.userId, role, joinedAt: moment });
+    await database().insert(memberships).values({ outfitId: made.id, id, userId: person.userId, role, joinedAt: moment });
     members.set(role, { id, ...person });
   }
   return { ...made, members };

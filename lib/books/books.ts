@@ -125,6 +125,7 @@ export class Books {
     await this.requireOpen(clean.on);
     if (clean.lines.length > 0) await this.writeMovement(clean);
     if (clean.postings.length > 0) await this.writeEntry(clean);
+    await this.tx.update(bookState).set({ nextSequence: this.sequence }).where(eq(bookState.outfitId, this.outfitId));
     await this.moveBins(clean);
     await this.moveLots(clean);
     await this.moveStock(clean);
@@ -154,7 +155,6 @@ export class Books {
     await this.tx
       .insert(movementLines)
       .values(booking.lines.map((line, index) => ({ outfitId: this.outfitId, movementId: head.id, line: index + 1, occurredOn: booking.on, ...line })));
-    await this.tx.update(bookState).set({ nextSequence: this.sequence }).where(eq(bookState.outfitId, this.outfitId));
   }
 
   private async writeEntry(booking: Booking): Promise<void> {
@@ -163,7 +163,6 @@ export class Books {
     await this.tx
       .insert(postings)
       .values(booking.postings.map((posting, index) => ({ outfitId: this.outfitId, entryId: head.id, line: index + 1, occurredOn: booking.on, ...posting })));
-    await this.tx.update(bookState).set({ nextSequence: this.sequence }).where(eq(bookState.outfitId, this.outfitId));
   }
 
   private async moveBins(booking: Booking): Promise<void> {

@@ -80,17 +80,17 @@ export const GRADES = [
 
 /** What comes in, and how often of a hundred. */
 export const FINDS = [
-  { key: "clothes-washer", share: 14, most: 2 },
-  { key: "clothes-dryer-electric", share: 11, most: 2 },
-  { key: "dishwasher", share: 9, most: 1 },
-  { key: "microwave-oven", share: 13, most: 3 },
-  { key: "upright-vacuum", share: 12, most: 2 },
-  { key: "desktop-computer", share: 9, most: 3 },
-  { key: "printer", share: 8, most: 2 },
-  { key: "electric-range", share: 7, most: 1 },
-  { key: "water-heater-electric", share: 6, most: 1 },
-  { key: "box-fan", share: 6, most: 2 },
-  { key: "stereo-receiver", share: 5, most: 2 },
+  { key: "clothes-washer", share: 14, most: 3 },
+  { key: "clothes-dryer-electric", share: 11, most: 3 },
+  { key: "dishwasher", share: 9, most: 2 },
+  { key: "microwave-oven", share: 13, most: 5 },
+  { key: "upright-vacuum", share: 12, most: 4 },
+  { key: "desktop-computer", share: 9, most: 6 },
+  { key: "printer", share: 8, most: 4 },
+  { key: "electric-range", share: 7, most: 2 },
+  { key: "water-heater-electric", share: 6, most: 3 },
+  { key: "box-fan", share: 6, most: 4 },
+  { key: "stereo-receiver", share: 5, most: 4 },
 ] as const;
 
 /** Finds that wait for a record before anybody may cut them. */

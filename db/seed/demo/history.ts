@@ -71,14 +71,14 @@ export function historyUntil(lastDay: string, yields: Yield): Day[] {
   const haul = (on: string): Happening => {
     const source = random.pick(["curb", "curb", "curb", "call-out", "call-out", "drop-off", "bought"] as const);
     const items = new Map<string, number>();
-    for (let left = random.between(1, 4); left > 0; left -= 1) {
+    for (let left = random.between(3, 5); left > 0; left -= 1) {
       const find = random.pick(HAT);
-      items.set(find.key, Math.min((items.get(find.key) ?? 0) + random.between(1, find.most), 6));
+      items.set(find.key, Math.min((items.get(find.key) ?? 0) + random.between(2, find.most + 2), 12));
     }
     ref += 1;
     const list = [...items].map(([kind, count]) => ({ kind, count }));
     open.push({ ref, on, items: list });
-    const paidMinor = source === "bought" ? random.between(8, 30) * 100 : source === "call-out" && random.chance(20) ? random.between(5, 15) * 100 : 0;
+    const paidMinor = source === "bought" ? random.between(12, 48) * 100 : source === "call-out" && random.chance(20) ? random.between(5, 15) * 100 : 0;
     return { what: "pickup", ref, source, place: `${random.pick(STREETS)}, by no. ${random.between(2, 88)}`, paidMinor, items: list };
   };
 
@@ -102,7 +102,7 @@ export function historyUntil(lastDay: string, yields: Yield): Day[] {
     }
     const weighed = GRADES.flatMap((grade): Happening[] => {
       const net = sums.get(grade.key) ?? 0;
-      if (net < 25) return [];
+      if (net < 320) return [];
       // A bench scale reads in steps of 0.05 lb.
       const rounded = Math.trunc(net / 5) * 5;
       const label = grade.bins[(bin.get(grade.key) ?? 0) % grade.bins.length] ?? grade.bins[0];
@@ -114,7 +114,7 @@ export function historyUntil(lastDay: string, yields: Yield): Day[] {
 
   const sale = (on: string): Happening[] => {
     // What is ripe goes; a run that would carry next to nothing stays home.
-    const ripe = GRADES.filter((grade) => (held.get(grade.key) ?? 0) * 100 >= grade.sellPoint * 100 * random.between(55, 90)).map((grade) => grade.key);
+    const ripe = GRADES.filter((grade) => (held.get(grade.key) ?? 0) * 100 >= grade.sellPoint * 100 * random.between(35, 70)).map((grade) => grade.key);
     if (ripe.length < 3) return [];
     for (const key of ripe) {
       held.set(key, 0);
@@ -122,7 +122,7 @@ export function historyUntil(lastDay: string, yields: Yield): Day[] {
     }
     const yard = random.pick([0, 0, 1, 1, 2, 2, 3]);
     paper += random.between(3, 29);
-    const recent = addDays(lastDay, -4) <= on;
+    const recent = addDays(lastDay, -6) <= on;
     return [{ what: "sale", yard, number: String(paper), grades: ripe, payAfter: recent ? null : random.pick([0, 0, 2, 3, 5]), short: random.chance(12) }];
   };
 
