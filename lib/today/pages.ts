@@ -5,8 +5,9 @@ import type { Context } from "@/lib/auth/context";
 import { can, seesCost, seesPrices, seesTicketMoney } from "@/lib/auth/permissions";
 import { addDays, daysBetween, monthOf } from "@/lib/clock";
 import { recordName } from "@/lib/catalogue/hazards";
+import { outfitsOf } from "@/lib/people/queries";
 import type { BestPrice } from "@/lib/prices/queries";
-import { fullBins, heldItems, lineFigures, monthSoFar, outfitsOf, shopOf, waitingTickets, type LineFigures, type Shop } from "./queries";
+import { fullBins, heldItems, lineFigures, monthSoFar, shopOf, waitingTickets, type LineFigures, type Shop } from "./queries";
 import { staleSheets, type FullBin, type StaleSheet } from "./rules";
 
 /** Both the line and Today show what stands in the shop, so it is read once a request. */

@@ -1,7 +1,7 @@
 import "server-only";
 import { and, asc, eq, gte, inArray, isNotNull, isNull, sql } from "drizzle-orm";
 import type { Reader } from "@/db/client";
-import { accountMonths, accounts, binBalances, bins, grades, itemKinds, memberships, outfits, pickupItems, pickups, tickets, yards } from "@/db/schema";
+import { accountMonths, accounts, binBalances, bins, grades, itemKinds, outfits, pickupItems, pickups, tickets, yards } from "@/db/schema";
 import { trim } from "@/lib/arithmetic/decimal";
 import type { Context } from "@/lib/auth/context";
 import { seesCost, seesPrices, seesTicketMoney } from "@/lib/auth/permissions";
@@ -152,12 +152,3 @@ export async function monthSoFar(db: Reader, { outfitId, month }: { outfitId: st
     .where(and(eq(accountMonths.outfitId, outfitId), eq(accountMonths.month, month)));
   return row ?? { incomeMinor: 0, scrapMinor: 0, costsMinor: 0 };
 }
-
-/** The outfits a person belongs to, for switching between them. */
-export const outfitsOf = (db: Reader, { userId }: { userId: string }): Promise<{ slug: string; name: string }[]> =>
-  db
-    .select({ slug: outfits.slug, name: outfits.name })
-    .from(memberships)
-    .innerJoin(outfits, eq(outfits.id, memberships.outfitId))
-    .where(and(eq(memberships.userId, userId), isNull(memberships.removedAt)))
-    .orderBy(asc(outfits.name));
