@@ -4,8 +4,8 @@ import { database } from "@/db/client";
 import { grades } from "@/db/schema";
 import type { Context } from "@/lib/auth/context";
 import { seesPrices } from "@/lib/auth/permissions";
-import { aliasesOf, getSheet, latestSheetId, listYards } from "./queries";
-import type { Sheet } from "./schema";
+import { aliasesOf, getSheet, getYard, latestSheetId, listYards } from "./queries";
+import type { Sheet, Yard } from "./schema";
 
 /** A row of the sheet form: a grade, and what the yard pays when it is on the sheet. */
 export type SheetRow = { gradeId: string; name: string; family: string; wording: string; price: string; per: string };
@@ -52,3 +52,9 @@ export async function sheetToChange(ctx: Context, id: string): Promise<{ sheet: 
   const sheet = await getSheet(database(), { outfitId: ctx.outfit.id, id });
   return sheet === null ? null : { sheet, rows: await rowsFor(ctx, sheet.yardId, sheet) };
 }
+
+/** One yard, or null. */
+export const findYard = (ctx: Context, id: string): Promise<Yard | null> => getYard(database(), { outfitId: ctx.outfit.id, id });
+
+/** One price sheet, or null. Whether the member sees prices is for the page. */
+export const findSheet = (ctx: Context, id: string): Promise<Sheet | null> => getSheet(database(), { outfitId: ctx.outfit.id, id });

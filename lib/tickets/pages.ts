@@ -6,6 +6,8 @@ import { trim } from "@/lib/arithmetic/decimal";
 import type { Context } from "@/lib/auth/context";
 import { seesPrices } from "@/lib/auth/permissions";
 import { pricesInForce } from "@/lib/prices/queries";
+import { getTicket } from "./queries";
+import type { Ticket } from "./schema";
 
 /** What the ticket form offers: yards in use, grades, bins with what they hold, and the prices in force. Four queries at once. */
 export async function ticketChoices(ctx: Context) {
@@ -41,3 +43,6 @@ export async function ticketChoices(ctx: Context) {
     prices: priceRows.map(({ yardId, gradeId, price, per, yardWording, inForceFrom }) => ({ yardId, gradeId, price, per, wording: yardWording, inForceFrom })),
   };
 }
+
+/** One sale ticket with the money that this member sees, or null. */
+export const findTicket = (ctx: Context, id: string): Promise<Ticket | null> => getTicket(database(), { outfitId: ctx.outfit.id, id, viewer: ctx });

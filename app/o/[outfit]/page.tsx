@@ -25,14 +25,14 @@ export default async function TodayPage({ params }: { params: Promise<{ outfit: 
   const { role } = ctx.actor;
   const { today } = ctx;
   return (
-    <div className="page aside">
+    <div className="page aside today">
       <PageHead title={formatDate(today)} actions={<FirstThings slug={slug} role={role} />} />
-      <div className="grid gap-4">
-        <StandingPanel slug={slug} standing={standing} unit={unit} currency={currency} money={seesPrices(role, hidesMoney)} />
-        {month ? <MonthPanel slug={slug} month={monthOf(today)} currency={currency} figures={month} /> : null}
-        <HaulList slug={slug} pickups={pickups.items} count={figures.openPickups} unit={unit} today={today} />
-      </div>
       <NeedList needs={needs} slug={slug} currency={currency} unit={unit} today={today} />
+      <div className="work">
+        <HaulList slug={slug} pickups={pickups.items} count={figures.openPickups} unit={unit} today={today} />
+        {month ? <MonthPanel slug={slug} month={monthOf(today)} currency={currency} figures={month} /> : null}
+      </div>
+      <StandingPanel slug={slug} standing={standing} unit={unit} currency={currency} money={seesPrices(role, hidesMoney)} />
     </div>
   );
 }

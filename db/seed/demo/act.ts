@@ -14,7 +14,7 @@ import { draftTicket, payTicket, postTicket } from "@/lib/tickets/service";
 import { GRADES, YARDS } from "./figures";
 import type { Happening } from "./history";
 import { hundredths, toHundredths } from "./random";
-import { contextOn, type Stage } from "./tell";
+import { contextOn, type Stage } from "./stage";
 
 type Keys = { gradeIds: Map<string, string>; kindIds: Map<string, string> };
 type Sale = Extract<Happening, { what: "sale" }>;

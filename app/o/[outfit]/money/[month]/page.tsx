@@ -4,7 +4,7 @@ import { EarningsWaterfall, WhyItChanged } from "@/components/money/earnings-cha
 import { EarningsKey } from "@/components/money/earnings-key";
 import { GradeTable } from "@/components/money/grade-table";
 import { MoneyNav } from "@/components/money/money-nav";
-import { MonthActions } from "@/components/money/month-actions";
+import { MonthQuestion } from "@/components/money/month-question";
 import { RunningCosts } from "@/components/money/running-costs";
 import { currencySign } from "@/components/money/words";
 import { Button } from "@/components/ui/button";
@@ -27,7 +27,7 @@ export async function generateMetadata({ params }: { params: Params }): Promise<
 }
 
 /** The month's review: what was sold, what it cost, what was left, and why that changed. */
-export default async function MonthPage({ params }: { params: Params }) {
+export default async function MonthPage({ params, searchParams }: { params: Params; searchParams: Promise<{ ask?: string | string[] }> }) {
   const { outfit: slug, month: text } = await params;
   const ctx = await pageContextFor(slug, "earnings.see");
   const parsed = earningsQuery.safeParse({ month: text });
@@ -47,6 +47,7 @@ export default async function MonthPage({ params }: { params: Params }) {
   };
   const verb = earnings.closedAt === null ? "close" : "reopen";
   const mayAct = verb === "close" ? can(role, "months.close") && month < present : can(role, "months.reopen");
+  const asking = mayAct && (await searchParams).ask === verb;
   const state = earnings.closedAt !== null ? "Closed." : month < present ? "Open." : month === present ? "Open, and not over yet." : "Not begun.";
   return (
     <div className="page aside">
@@ -57,9 +58,15 @@ export default async function MonthPage({ params }: { params: Params }) {
           <>
             {beside(-1)}
             {month < present ? beside(1) : null}
+            {mayAct && !asking ? (
+              <Button variant={verb === "close" ? "filled" : "line"} href={`/o/${slug}/money/${month}?ask=${verb}`}>
+                {verb === "close" ? "Close the month" : "Open the month again"}
+              </Button>
+            ) : null}
           </>
         }
       />
+      {asking ? <MonthQuestion slug={slug} month={month} verb={verb} /> : null}
       <MoneyNav slug={slug} current="month" />
       <EarningsKey earnings={earnings} slug={slug} currency={currency} exponent={exponent} unit={unit} />
       <EarningsWaterfall earnings={earnings} currency={currency} unit={unit} />
@@ -81,10 +88,7 @@ export default async function MonthPage({ params }: { params: Params }) {
           />
         )}
       </Panel>
-      <div className="grid gap-4">
-        <RunningCosts slug={slug} earnings={earnings} currency={currency} />
-        {mayAct ? <MonthActions slug={slug} month={month} verb={verb} /> : null}
-      </div>
+      <RunningCosts slug={slug} earnings={earnings} currency={currency} />
     </div>
   );
 }

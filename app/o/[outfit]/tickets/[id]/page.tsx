@@ -7,12 +7,11 @@ import { TicketRecord } from "@/components/tickets/ticket-record";
 import { TicketVerdict } from "@/components/tickets/ticket-verdict";
 import { PageHead } from "@/components/ui/page-head";
 import { Panel } from "@/components/ui/panel";
-import { database } from "@/db/client";
 import { pageContextFor } from "@/lib/auth/page";
 import { can, seesTicketMoney } from "@/lib/auth/permissions";
 import { formatDate } from "@/lib/format";
 import { checkTicket } from "@/lib/tickets/check";
-import { getTicket } from "@/lib/tickets/queries";
+import { findTicket } from "@/lib/tickets/pages";
 
 export const metadata: Metadata = { title: "Sale ticket" };
 
@@ -22,7 +21,7 @@ export default async function TicketPage({ params }: { params: Promise<{ outfit:
   const ctx = await pageContextFor(slug, "tickets.see");
   const { role } = ctx.actor;
   const { weightUnit, currency, exponent } = ctx.outfit;
-  const ticket = await getTicket(database(), { outfitId: ctx.outfit.id, id, viewer: ctx });
+  const ticket = await findTicket(ctx, id);
   if (!ticket) notFound();
   const money = seesTicketMoney(role, ctx.outfit.hidesMoney);
   const check = money ? await checkTicket(ctx, id) : null;

@@ -5,11 +5,10 @@ import { LedgerTable, RowHead, Td, Th } from "@/components/ui/ledger-table";
 import { PageHead } from "@/components/ui/page-head";
 import { Panel } from "@/components/ui/panel";
 import { GradeTag } from "@/components/ui/tag";
-import { database } from "@/db/client";
 import { pageContextFor } from "@/lib/auth/page";
 import { can, seesPrices } from "@/lib/auth/permissions";
 import { formatDate, formatPrice } from "@/lib/format";
-import { getSheet } from "@/lib/prices/queries";
+import { findSheet } from "@/lib/prices/pages";
 
 export const metadata: Metadata = { title: "Price sheet" };
 
@@ -17,7 +16,7 @@ export const metadata: Metadata = { title: "Price sheet" };
 export default async function SheetPage({ params }: { params: Promise<{ outfit: string; id: string }> }) {
   const { outfit: slug, id } = await params;
   const ctx = await pageContextFor(slug, "prices.see");
-  const sheet = seesPrices(ctx.actor.role, ctx.outfit.hidesMoney) ? await getSheet(database(), { outfitId: ctx.outfit.id, id }) : null;
+  const sheet = seesPrices(ctx.actor.role, ctx.outfit.hidesMoney) ? await findSheet(ctx, id) : null;
   if (!sheet) notFound();
   const { role } = ctx.actor;
   const until = sheet.lastDay ? `to ${formatDate(sheet.lastDay, { today: ctx.today })}` : "until the next sheet";

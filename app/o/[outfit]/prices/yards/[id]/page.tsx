@@ -3,10 +3,9 @@ import { notFound } from "next/navigation";
 import { YardForm } from "@/components/prices/yard-form";
 import { PageHead } from "@/components/ui/page-head";
 import { Panel } from "@/components/ui/panel";
-import { database } from "@/db/client";
 import { pageContextFor } from "@/lib/auth/page";
 import { can } from "@/lib/auth/permissions";
-import { getYard } from "@/lib/prices/queries";
+import { findYard } from "@/lib/prices/pages";
 
 export const metadata: Metadata = { title: "Yard" };
 
@@ -14,7 +13,7 @@ export const metadata: Metadata = { title: "Yard" };
 export default async function YardPage({ params }: { params: Promise<{ outfit: string; id: string }> }) {
   const { outfit: slug, id } = await params;
   const ctx = await pageContextFor(slug, "yards.see");
-  const yard = await getYard(database(), { outfitId: ctx.outfit.id, id });
+  const yard = await findYard(ctx, id);
   if (!yard) notFound();
   if (can(ctx.actor.role, "yards.change")) {
     return (

@@ -1,12 +1,10 @@
 import type { Metadata } from "next";
 import { notFound, redirect } from "next/navigation";
 import { TicketForm } from "@/components/tickets/ticket-form";
-import { database } from "@/db/client";
 import { pageContextFor } from "@/lib/auth/page";
 import { can } from "@/lib/auth/permissions";
-import { ticketChoices } from "@/lib/tickets/pages";
 import { typedFrom } from "@/lib/tickets/paper";
-import { getTicket } from "@/lib/tickets/queries";
+import { findTicket, ticketChoices } from "@/lib/tickets/pages";
 
 export const metadata: Metadata = { title: "Change draft" };
 
@@ -14,7 +12,7 @@ export const metadata: Metadata = { title: "Change draft" };
 export default async function EditTicketPage({ params }: { params: Promise<{ outfit: string; id: string }> }) {
   const { outfit: slug, id } = await params;
   const ctx = await pageContextFor(slug, "tickets.draft");
-  const [ticket, choices] = await Promise.all([getTicket(database(), { outfitId: ctx.outfit.id, id, viewer: ctx }), ticketChoices(ctx)]);
+  const [ticket, choices] = await Promise.all([findTicket(ctx, id), ticketChoices(ctx)]);
   if (!ticket) notFound();
   if (ticket.state !== "draft") redirect(`/o/${slug}/tickets/${id}`);
   const { weightUnit, currency, exponent } = ctx.outfit;
