@@ -49,7 +49,7 @@ export function StandingPanel({ slug, standing, unit, currency, money }: Standin
   );
   if (families.length === 0)
     return (
-      <Panel title="Standing in the shop" end={link}>
+      <Panel title="Standing in the shop" end={link} className="full">
         <EmptyState level={3} title="The bins are empty">
           Weigh metal into a bin and it stands here at once, for everyone.
         </EmptyState>
@@ -62,7 +62,7 @@ export function StandingPanel({ slug, standing, unit, currency, money }: Standin
   }. The columns below have the figures.`;
   const missing = money && standing.unpriced > 0 ? ` ${standing.unpriced === 1 ? "One grade has" : `${standing.unpriced} grades have`} no price.` : "";
   return (
-    <Panel title="Standing in the shop" sub={money ? `valued at each grade’s best price sheet.${missing}` : "by weight"} end={link} padded>
+    <Panel title="Standing in the shop" sub={money ? `valued at each grade’s best price sheet.${missing}` : "by weight"} end={link} padded className="full">
       <ShareBar
         families={families.map((one) => one.family)}
         upper={{ label: "Weight", values: families.map((one) => forDrawing(one.quantity)) }}

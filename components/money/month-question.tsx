@@ -1,6 +1,6 @@
 "use client";
 
-import { useState } from "react";
+import { useRouter } from "next/navigation";
 import { Button } from "@/components/ui/button";
 import { ErrorSummary } from "@/components/ui/error-summary";
 import { Panel } from "@/components/ui/panel";
@@ -8,29 +8,22 @@ import { formatMonth } from "@/lib/format";
 import { sendMonth } from "@/lib/money/client";
 import { useAct } from "./use-act";
 
-interface MonthActionsProps {
+interface MonthQuestionProps {
   slug: string;
   month: string;
   verb: "close" | "reopen";
 }
 
-/** Closing a month, or opening it again: asks first and says what it does. */
-export function MonthActions({ slug, month, verb }: MonthActionsProps) {
-  const [asking, setAsking] = useState(false);
+/** Asks before a month is closed or opened again, and says what that does. */
+export function MonthQuestion({ slug, month, verb }: MonthQuestionProps) {
+  const router = useRouter();
+  const back = `/o/${slug}/money/${month}`;
   const { run, busy, problem } = useAct(
     (key) => sendMonth(slug, month, verb, key),
-    () => setAsking(false),
+    () => router.replace(back),
   );
   const name = formatMonth(month);
   const closing = verb === "close";
-  if (!asking)
-    return (
-      <div>
-        <Button variant={closing ? "filled" : "line"} onClick={() => setAsking(true)}>
-          {closing ? "Close the month" : "Open the month again"}
-        </Button>
-      </div>
-    );
   return (
     <Panel title={closing ? `Close ${name}?` : `Open ${name} again?`} padded className="full">
       <div className="grid gap-3">
@@ -41,7 +34,7 @@ export function MonthActions({ slug, month, verb }: MonthActionsProps) {
             : "Records can be dated in it again, and its figures can change. That it was opened stays on record."}
         </p>
         <div className="flex flex-wrap gap-3">
-          <Button variant="line" onClick={() => setAsking(false)}>
+          <Button variant="line" href={back}>
             {closing ? "Keep it open" : "Keep it closed"}
           </Button>
           <Button aria-busy={busy} onClick={() => void run()}>
