@@ -1,5 +1,6 @@
 import type { Metadata, Viewport } from "next";
 import localFont from "next/font/local";
+import { connection } from "next/server";
 import type { ReactNode } from "react";
 import { HatchDefs } from "@/components/ui/hatch-defs";
 import "./globals.css";
@@ -63,7 +64,9 @@ export const viewport: Viewport = {
 };
 
 /** The frame of every page: the face, the tokens, and the hatches that charts point at. */
-export default function RootLayout({ children }: { children: ReactNode }) {
+export default async function RootLayout({ children }: { children: ReactNode }) {
+  // Every page is made for its request, because the policy against foreign scripts gives each answer a nonce of its own.
+  await connection();
   return (
     <html lang="en" className={`${archivo.variable} ${archivoExt.variable}`}>
       <body>

@@ -1,11 +1,17 @@
-/** Why signing in did not work, in words for the form. */
-export type SignInProblem =
-  | "Email or password is wrong. Type both again."
-  | "Too many tries. Wait 15 minutes, then try again."
-  | "The ledger did not answer. Check the signal and try again.";
+const WRONG = "Email or password is wrong. Type both again.";
+const NO_ANSWER = "The ledger did not answer. Check the signal and try again.";
 
-/** Signs in through next-auth's own routes. Null when it worked: the browser holds the session then. */
-export async function signInWithPassword(email: string, password: string): Promise<SignInProblem | null> {
+/** How long to wait, out of the server's `too-many-{seconds}`; null for any other code. */
+function waitOf(code: string | null): string | null {
+  const seconds = /^too-many-(\d{1,6})$/.exec(code ?? "")?.[1];
+  if (seconds === undefined) return null;
+  const minutes = Math.ceil(Number.parseInt(seconds, 10) / 60);
+  const wait = minutes <= 1 ? "1 minute" : minutes < 120 ? `${minutes} minutes` : `${Math.ceil(minutes / 60)} hours`;
+  return `Too many tries. Wait ${wait}, then try again.`;
+}
+
+/** Signs in through next-auth's own routes. Null when it worked: the browser holds the session then; else why not, in words for the form. */
+export async function signInWithPassword(email: string, password: string): Promise<string | null> {
   try {
     const csrf = (await (await fetch("/api/auth/csrf")).json()) as { csrfToken: string };
     const answer = await fetch("/api/auth/callback/credentials", {
@@ -16,8 +22,8 @@ export async function signInWithPassword(email: string, password: string): Promi
     if (answer.ok) return null;
     const body = (await answer.json().catch(() => ({}))) as { url?: string };
     const why = body.url ? new URL(body.url, window.location.origin).searchParams.get("error") : null;
-    return why === "too-many" ? "Too many tries. Wait 15 minutes, then try again." : "Email or password is wrong. Type both again.";
+    return waitOf(why) ?? WRONG;
   } catch {
-    return "The ledger did not answer. Check the signal and try again.";
+    return NO_ANSWER;
   }
 }

@@ -19,6 +19,19 @@ export const users = mysqlTable(
   (t) => [uniqueIndex("users_email").on(t.email)],
 );
 
+/** Sessions that were signed out of before their token ran out: a kept copy of such a token is refused. */
+export const endedSessions = mysqlTable(
+  "ended_sessions",
+  {
+    /** The session's own id, which its token carries. */
+    id: id("id").primaryKey(),
+    /** When the last token of the session runs out by itself; then the row is of no use. */
+    expiresAt: instant("expires_at").notNull(),
+  },
+  // Rows of no use are swept by age.
+  (t) => [index("ended_sessions_age").on(t.expiresAt)],
+);
+
 /** One business: the tenant. Every other table's key starts with its id. */
 export const outfits = mysqlTable(
   "outfits",

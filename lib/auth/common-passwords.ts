@@ -23,7 +23,13 @@ const COMMON_STARTS = [
   "secret",
   "abc123",
   "correct horse battery staple",
-  "correcthorsebatterystaple",
+  "thisismypassword",
+  "thequickbrownfox",
+  "jumpsoverthelazydog",
+  "1q2w3e4r5t6y7u8i9o0p",
+  "1qaz2wsx3edc4rfv",
+  "qazwsxedcrfvtgb",
+  "zaq12wsxcde34rfv",
 ];
 const RUNS = ["abcdefghijklmnopqrstuvwxyz", "01234567890123456789", "98765432109876543210", "qwertyuiopasdfghjklzxcvbnm", "qwertyuiop[]asdfghjkl"];
 
@@ -36,8 +42,10 @@ const bare = (text: string) =>
 /** Whether a password of enough length is still one that an attacker tries first: common words, runs, repeats, or the person's own words. */
 export function isCommonPassword(password: string, ownWords: string[] = []): boolean {
   const plain = bare(password);
-  if (plain.length < 8) return true;
-  if (new Set(plain).size < 5) return true;
+  const marks = new Set(password.normalize("NFKC").replaceAll(/\s/gu, ""));
+  if (marks.size < 5) return true;
+  // Marks and pictures alone are a password like any other, if they are not the same few again and again.
+  if (plain.length < 8) return marks.size < 8;
   const half = plain.slice(0, Math.ceil(plain.length / 2));
   if (RUNS.some((run) => run.includes(plain) || (run.includes(half) && run.includes(plain.slice(half.length))))) return true;
   for (let size = 1; size <= plain.length / 2; size += 1) {

@@ -14,5 +14,7 @@ declare module "next-auth" {
 declare module "next-auth/jwt" {
   interface JWT {
     sessionVersion?: number;
+    /** The same in every token of one session, so that signing out ends all of them. */
+    sessionId?: string;
   }
 }

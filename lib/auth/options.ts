@@ -1,7 +1,10 @@
 import "server-only";
 import type { NextAuthOptions } from "next-auth";
 import CredentialsProvider from "next-auth/providers/credentials";
+import { now } from "@/lib/clock";
 import { env } from "@/lib/env";
+import { newId } from "@/lib/ids";
+import { endSession } from "./session";
 import { signIn } from "./sign-in";
 
 /** Thirty days: a driver's phone stays signed in; the version check ends sessions at once when it must. */
@@ -25,9 +28,14 @@ export const authOptions = (): NextAuthOptions => ({
     }),
   ],
   callbacks: {
-    jwt: ({ token, user }) => (user ? { ...token, sub: user.id, sessionVersion: user.sessionVersion } : token),
+    jwt: ({ token, user }) => (user ? { ...token, sub: user.id, sessionVersion: user.sessionVersion, sessionId: newId() } : token),
     session: ({ session, token }) => ({ ...session, user: { ...session.user, id: token.sub ?? "" } }),
     redirect: ({ url, baseUrl }) => (url.startsWith("/") && !url.startsWith("//") ? `${baseUrl}${url}` : url.startsWith(`${baseUrl}/`) ? url : baseUrl),
+  },
+  events: {
+    signOut: async ({ token }) => {
+      if (token.sessionId !== undefined) await endSession(token.sessionId, new Date(now().getTime() + SESSION_SECONDS * 1000));
+    },
   },
   logger: { error: () => undefined, warn: () => undefined, debug: () => undefined },
 });

@@ -1,23 +1,35 @@
 import "server-only";
-import { and, eq, isNull } from "drizzle-orm";
+import { and, eq, isNull, lt, notExists } from "drizzle-orm";
 import { getToken, type GetTokenParams } from "next-auth/jwt";
 import { database } from "@/db/client";
-import { apiKeys, memberships, outfits, users } from "@/db/schema";
+import { apiKeys, endedSessions, memberships, outfits, users } from "@/db/schema";
 import { currencyExponent } from "@/lib/arithmetic/money";
+import { now } from "@/lib/clock";
 import { env } from "@/lib/env";
+import { log } from "@/lib/log";
 import type { Actor, Outfit } from "./context";
 import { hashToken } from "./tokens";
 
 /** A person as their session token has them; the version is still to be checked against the database. */
-type Claim = { userId: string; sessionVersion: number };
+type Claim = { userId: string; sessionVersion: number; sessionId: string };
 
 /** Cookies and headers of a request, however the framework hands them over. */
 export type Carrier = GetTokenParams["req"];
 
 async function claimOf(carrier: Carrier): Promise<Claim | null> {
   const token = await getToken({ req: carrier, secret: env().NEXTAUTH_SECRET, secureCookie: env().NEXTAUTH_URL.startsWith("https:") });
-  if (typeof token?.sub !== "string" || typeof token.sessionVersion !== "number") return null;
-  return { userId: token.sub, sessionVersion: token.sessionVersion };
+  if (typeof token?.sub !== "string" || typeof token.sessionVersion !== "number" || typeof token.sessionId !== "string") return null;
+  return { userId: token.sub, sessionVersion: token.sessionVersion, sessionId: token.sessionId };
+}
+
+const notEnded = (claim: Claim) => notExists(database().select({ id: endedSessions.id }).from(endedSessions).where(eq(endedSessions.id, claim.sessionId)));
+
+/** Ends one session for good. `expiresAt` is when its last token would have run out. */
+export async function endSession(sessionId: string, expiresAt: Date): Promise<void> {
+  const db = database();
+  await db.insert(endedSessions).ignore().values({ id: sessionId, expiresAt });
+  await db.delete(endedSessions).where(lt(endedSessions.expiresAt, now()));
+  log.info({ event: "sign-out" }, "signed out");
 }
 
 export type Person = { id: string; name: string; email: string };
@@ -29,7 +41,7 @@ export async function personOf(carrier: Carrier): Promise<Person | null> {
   const [user] = await database()
     .select({ id: users.id, name: users.name, email: users.email })
     .from(users)
-    .where(and(eq(users.id, claim.userId), eq(users.sessionVersion, claim.sessionVersion)));
+    .where(and(eq(users.id, claim.userId), eq(users.sessionVersion, claim.sessionVersion), notEnded(claim)));
   return user ?? null;
 }
 
@@ -67,7 +79,7 @@ export async function memberOf(carrier: Carrier, slug: string): Promise<Presence
     .from(users)
     .leftJoin(outfits, eq(outfits.slug, slug))
     .leftJoin(memberships, and(eq(memberships.userId, users.id), eq(memberships.outfitId, outfits.id), isNull(memberships.removedAt)))
-    .where(eq(users.id, claim.userId));
+    .where(and(eq(users.id, claim.userId), notEnded(claim)));
   if (!row || row.sessionVersion !== claim.sessionVersion) return "signed-out";
   if (!row.outfit || !row.memberId || !row.role) return "absent";
   return {

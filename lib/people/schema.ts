@@ -26,13 +26,14 @@ const passwordField = z
   .refine((text) => !isCommonPassword(text), "That password is one of the first that others try. Take three or four words of your own.");
 
 /** The words of a person that their password must not be made of. */
-const ownWords = (input: { name: string; email: string; outfit?: { name: string } | undefined }) => [
+export const ownWords = (input: { name: string; email: string; outfit?: { name: string } | undefined }) => [
   ...input.name.split(/\s+/),
   ...input.email.split(/[@.]/),
   ...(input.outfit ? input.outfit.name.split(/\s+/) : []),
 ];
 
-const OWN_WORDS = { path: ["password"], error: "That password is made of your own name or outfit. Take three or four other words." };
+/** The problem with a password made of them. */
+export const OWN_WORDS = { path: ["password"], error: "That password is made of your own name or outfit. Take three or four other words." };
 
 const outfitFields = {
   name: nameField("Outfit name"),

@@ -4,16 +4,18 @@ import { database } from "@/db/client";
 import { apiKeys, auditLog, bookState, memberships, outfits, users } from "@/db/schema";
 import { inTransaction, isDuplicateKey, type Transaction } from "@/db/transaction";
 import type { Context } from "@/lib/auth/context";
+import { isCommonPassword } from "@/lib/auth/common-passwords";
 import { normalEmail } from "@/lib/auth/email";
 import { hashPassword, passwordMatches } from "@/lib/auth/password";
 import type { Person } from "@/lib/auth/session";
-import { requirePoints, SIGN_IN_PAIR, takePoint } from "@/lib/auth/throttle";
+import { clearPoints, PASSWORD_CHANGE, takePoint } from "@/lib/auth/throttle";
 import { audit, transact } from "@/lib/books/transact";
 import { AppError, fieldError, notFound } from "@/lib/http/errors";
 import { isId, newId } from "@/lib/ids";
+import { log } from "@/lib/log";
 import { createOutfit } from "./create-outfit";
 import { getMember, hasBooks, listMembers, outfitsOf } from "./queries";
-import type { Me, Member, Settings, SettingsChange, SignUpInput } from "./schema";
+import { OWN_WORDS, ownWords, type Me, type Member, type Settings, type SettingsChange, type SignUpInput } from "./schema";
 
 /** Adds a person. Sign-up cannot keep quiet about a mailbox that has an account without mail to answer by, so it says so; it is rate limited. */
 export async function insertUser(tx: Transaction, person: { name: string; email: string; password: string }, now: Date): Promise<string> {
@@ -55,19 +57,18 @@ export async function seeMe(person: Person): Promise<Me> {
 
 /** Changes a password and ends every session of the person, this one too. Throws `input` when the present one is wrong. */
 export async function changePassword(person: Person, input: { current: string; next: string }): Promise<{ done: true }> {
-  const key = `password|${person.id}`;
-  await requirePoints(SIGN_IN_PAIR, key);
+  await takePoint(PASSWORD_CHANGE, person.id);
   const db = database();
   const [user] = await db.select({ passwordHash: users.passwordHash }).from(users).where(eq(users.id, person.id));
-  if (!user || !(await passwordMatches(user.passwordHash, input.current))) {
-    await takePoint(SIGN_IN_PAIR, key);
-    throw fieldError("current", "That is not your password. Type it again.");
-  }
+  if (!user || !(await passwordMatches(user.passwordHash, input.current))) throw fieldError("current", "That is not your password. Type it again.");
+  if (isCommonPassword(input.next, ownWords(person))) throw fieldError("next", OWN_WORDS.error);
   const passwordHash = await hashPassword(input.next);
   await db
     .update(users)
     .set({ passwordHash, sessionVersion: sql`${users.sessionVersion} + 1` })
     .where(eq(users.id, person.id));
+  await clearPoints(PASSWORD_CHANGE, person.id);
+  log.info({ event: "password-changed", userId: person.id }, "password changed");
   return { done: true };
 }
 
@@ -77,6 +78,7 @@ export async function signOutEverywhere(person: Person): Promise<{ done: true }>
     .update(users)
     .set({ sessionVersion: sql`${users.sessionVersion} + 1` })
     .where(eq(users.id, person.id));
+  log.info({ event: "signed-out-everywhere", userId: person.id }, "signed out everywhere");
   return { done: true };
 }
 

@@ -4,7 +4,6 @@ import { listedRoutes } from "@/app/api/openapi.json/routes";
 import { openApiDocument } from "@/lib/http/openapi";
 
 export const metadata: Metadata = { title: "The API" };
-export const dynamic = "force-static";
 
 type Parameter = { name: string; in: string; required: boolean };
 type Operation = {
