@@ -60,9 +60,9 @@ export function StandingPanel({ slug, standing, unit, currency, money }: Standin
   const summary = `${formatWeight(standing.quantity)} ${unit} in ${columns.length} families${
     money && biggest ? `, worth ${formatMoney(standing.valueMinor, currency)}; most of it ${hatchName[biggest.hatch]}` : ""
   }. The columns below have the figures.`;
-  const missing = money && standing.unpriced > 0 ? ` ${standing.unpriced === 1 ? "One grade has" : `${standing.unpriced} grades have`} no price.` : "";
+  const missing = money && standing.unpriced > 0 ? `. ${standing.unpriced === 1 ? "One grade has" : `${standing.unpriced} grades have`} no price` : "";
   return (
-    <Panel title="Standing in the shop" sub={money ? `valued at each grade’s best price sheet.${missing}` : "by weight"} end={link} padded className="full">
+    <Panel title="Standing in the shop" sub={money ? `valued at each grade’s best price sheet${missing}` : "by weight"} end={link} padded className="full">
       <ShareBar
         families={families.map((one) => one.family)}
         upper={{ label: "Weight", values: families.map((one) => forDrawing(one.quantity)) }}
