@@ -1,4 +1,4 @@
-import { add, compare, isNegative, isPositive, isZero, min, multiply, divide, negate, subtract, sum, type DecimalString } from "@/lib/arithmetic/decimal";
+import { compare, isNegative, isPositive, isZero, min, multiply, divide, negate, subtract, sum, type DecimalString } from "@/lib/arithmetic/decimal";
 import { drawCost, issue, type StockState } from "@/lib/arithmetic/average";
 import { addMinor } from "@/lib/arithmetic/money";
 import { convertWeight, netWeight, type WeightUnit } from "@/lib/arithmetic/weight";
@@ -80,6 +80,3 @@ function gainCost(stock: StockState, quantity: DecimalString): number {
   if (isZero(stock.quantity)) return 0;
   return Number.parseInt(divide(multiply(String(stock.costMinor), quantity, 4), stock.quantity, 0), 10);
 }
-
-/** What a bin will hold. */
-export const willHold = (balance: DecimalString, net: DecimalString): DecimalString => add(balance, net);

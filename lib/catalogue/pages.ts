@@ -1,7 +1,7 @@
 import "server-only";
 import { database } from "@/db/client";
 import type { Context } from "@/lib/auth/context";
-import { activeItemKinds, getItemKind } from "./queries";
+import { activeItemKinds, getItemKind, listGrades } from "./queries";
 import type { ItemKind, ItemKindSheet } from "./schema";
 
 /** Every item kind whose name or group has these words in it; all of them for no words. */
@@ -13,3 +13,9 @@ export async function findItemKinds(ctx: Context, words: string): Promise<ItemKi
 
 /** An item kind with its breakdown sheet, or null. */
 export const getSheetPage = (ctx: Context, id: string): Promise<ItemKindSheet | null> => getItemKind(database(), { outfitId: ctx.outfit.id, id });
+
+/** The grades in use, for the picker of a new bin. */
+export async function gradesToHold(ctx: Context): Promise<{ id: string; name: string }[]> {
+  const { items } = await listGrades(database(), { outfitId: ctx.outfit.id, limit: 200, active: "true" });
+  return items.map(({ id, name }) => ({ id, name }));
+}

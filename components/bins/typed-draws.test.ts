@@ -1,0 +1,32 @@
+import { describe, expect, it } from "vitest";
+import { addDraw, drawsOf, readDraws } from "./typed-draws";
+
+describe("weights typed at the bench", () => {
+  it("a comma decimal is read as a decimal, not as ten times the weight", () => {
+    expect(readDraws([{ gross: "14,25", tare: "1.85 lb" }], "lb").net).toBe("12.4");
+  });
+
+  it("several draws make one weigh-in, and a last one left empty is left out", () => {
+    const draws = [
+      { gross: "10", tare: "2" },
+      { gross: "9.5", tare: "2" },
+      { gross: "", tare: "2" },
+    ];
+    expect(readDraws(draws, "lb").net).toBe("15.5");
+    expect(drawsOf(draws, "lb")).toEqual({
+      draws: [
+        { gross: "10", tare: "2" },
+        { gross: "9.5", tare: "2" },
+      ],
+    });
+  });
+
+  it("text that is no weight is sent as it is, so that the check can name the field", () => {
+    expect(drawsOf([{ gross: "abc", tare: "" }], "lb")).toEqual({ gross: "abc", tare: "0" });
+  });
+
+  it("no empty draw is put under an empty draw", () => {
+    expect(addDraw([{ gross: "", tare: "2" }], "2", "lb")).toHaveLength(1);
+    expect(addDraw([{ gross: "5", tare: "2" }], "2", "lb")).toHaveLength(2);
+  });
+});
