@@ -52,7 +52,10 @@ export function GradeTable({ slug, month, grades, unit, currency, sign, averageP
                   key={header.id}
                   numeric={header.column.id !== "gradeName" && header.column.id !== "share"}
                   unit={units[header.column.id]}
-                  sort={{ direction: sorted === false ? "none" : directions[sorted], onSort: () => header.column.toggleSorting(sorted !== "desc") }}
+                  sort={{
+                    direction: sorted === false ? "none" : directions[sorted],
+                    onSort: () => header.column.toggleSorting(header.column.id === "gradeName" ? sorted === "asc" : sorted !== "desc"),
+                  }}
                 >
                   <table.FlexRender header={header} />
                 </Th>

@@ -30,9 +30,6 @@ async function requireCost(db: Reader, ctx: Context, id: string): Promise<Cost> 
 /** A page of the costs this member sees, newest first. */
 export const seeCosts = (ctx: Context, query: CostListQuery) => listCosts(database(), { outfitId: ctx.outfit.id, ownOf: ownOf(ctx), ...query });
 
-/** One cost this member sees. Throws `not-found`. */
-export const seeCost = (ctx: Context, id: string): Promise<Cost> => requireCost(database(), ctx, id);
-
 /** Records money spent and books it. Throws `input` for a day that lies ahead, `books-refuse` for a day in a closed month. */
 export async function addCost(ctx: Context, input: CostInput): Promise<Cost> {
   if (input.spentOn > ctx.today) throw fieldError("spentOn", "Date must be today or earlier.");
