@@ -14,7 +14,7 @@ import { addressOf, idempotencyOf, ifMatchOf, readJson, requestIdOf, requireOwnO
 
 type Schema = z.ZodType;
 type Output<S> = S extends Schema ? z.output<S> : undefined;
-type RouteContext = { params: Promise<Record<string, string | string[] | undefined>> };
+type RouteContext = { params: Promise<Record<string, string | string[] | undefined> | undefined> };
 
 type Shape<Q, B, R> = {
   /** One line for the API page. */
@@ -57,8 +57,9 @@ function queryOf(request: NextRequest): Record<string, string> {
 }
 
 async function paramsOf(context: RouteContext): Promise<Record<string, string>> {
+  // A path without brackets comes with no parameters at all.
   const given = await context.params;
-  return Object.fromEntries(Object.entries(given).map(([name, value]) => [name, String(value)]));
+  return Object.fromEntries(Object.entries(given ?? {}).map(([name, value]) => [name, String(value)]));
 }
 
 /** The database's own refusals, for races that slipped between a use case's look and its write. */

@@ -29,7 +29,9 @@ export async function call<T = unknown>(handler: RouteHandler, outfit: { slug: s
     },
     ...(body === undefined ? {} : { body }),
   });
-  const response = await handler(request, { params: Promise.resolve({ ...(outfit ? { outfit: outfit.slug } : {}), ...input.params }) });
+  const params = { ...(outfit ? { outfit: outfit.slug } : {}), ...input.params };
+  // The framework hands over nothing where the path has no brackets.
+  const response = await handler(request, { params: Promise.resolve(Object.keys(params).length === 0 ? undefined : params) });
   const text = await response.text();
   const parsed: unknown = text === "" ? null : JSON.parse(text);
   return { status: response.status, body: parsed as T, problem: parsed as Problem, headers: response.headers };

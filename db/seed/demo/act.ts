@@ -151,6 +151,10 @@ export class Teller {
     }
     if (lines.length === 0) return;
     await this.enter(on, { yardId, number, lines, payAfter });
+    // The truck took all of it, so what the book still has is what the two scales differ by.
+    for (const { binId } of lines) {
+      if ((await this.held(binId)) > 0) await countBin(this.as("sorter", on), { binId, gross: "0", tare: "0", countedOn: on, note: "Empty after the run" });
+    }
   }
 
   private async enter(on: string, paper: { yardId: string; number: string; lines: { amountMinor: number }[]; payAfter: number | null }): Promise<void> {
