@@ -58,7 +58,7 @@ export function BinForm({ slug, unit, grades, kept }: Props) {
   return (
     <form noValidate className="grid gap-4" onSubmit={handleSubmit(send)}>
       <ErrorSummary problems={errors.map((one) => (one.path === "" ? { message: one.message } : { field: one.path, message: one.message }))} />
-      <Panel title={kept ? "Change this bin" : "Add a bin"} padded>
+      <Panel title={kept ? "Change this bin" : "The bin"} padded>
         <div className="grid gap-3">
           <TextField id="label" label="Label" hint="What is chalked on it, like C2-1." autoComplete="off" {...error("label")} {...register("label")} />
           {kept ? null : (

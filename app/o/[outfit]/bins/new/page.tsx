@@ -1,5 +1,6 @@
 import type { Metadata } from "next";
 import { BinForm } from "@/components/bins/bin-form";
+import { PageHead } from "@/components/ui/page-head";
 import { pageContextFor } from "@/lib/auth/page";
 import { gradesToHold } from "@/lib/catalogue/pages";
 
@@ -11,6 +12,7 @@ export default async function NewBinPage({ params }: { params: Promise<{ outfit:
   const ctx = await pageContextFor(slug, "bins.change");
   return (
     <div className="page narrow-page">
+      <PageHead title="Add a bin" fact="One grade a bin." />
       <BinForm slug={slug} unit={ctx.outfit.weightUnit} grades={await gradesToHold(ctx)} kept={null} />
     </div>
   );
