@@ -7,7 +7,7 @@ import { Button } from "@/components/ui/button";
 export function CopyOnce({ label, text, hint }: { label: string; text: string; hint: string }) {
   const [copied, setCopied] = useState(false);
   return (
-    <div className="notice" role="status">
+    <div className="notice mt-3" role="status">
       <label htmlFor="copy-once">{label}</label>
       <input id="copy-once" className="field w-full" readOnly value={text} onFocus={(event) => event.target.select()} />
       <div className="flex flex-wrap items-center gap-3 pt-2">

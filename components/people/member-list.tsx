@@ -11,6 +11,24 @@ import { roleWords } from "./role-words";
 
 type Props = { slug: string; members: Member[]; ownId: string; mayChange: boolean };
 
+/** Asked before a member is removed, right under their name. */
+function RemovalQuestion({ name, onKeep, onRemove }: { name: string; onKeep: () => void; onRemove: () => void }) {
+  return (
+    <div className="notice" role="group" aria-label={`Remove ${name}`}>
+      <h3>Remove {name}?</h3>
+      <p>They are signed out everywhere at once and their API keys stop working. What they booked stays in their name.</p>
+      <div className="flex flex-wrap gap-4 pt-2">
+        <Button variant="line" onClick={onKeep}>
+          Keep {name}
+        </Button>
+        <Button variant="danger" onClick={onRemove}>
+          Remove from the outfit
+        </Button>
+      </div>
+    </div>
+  );
+}
+
 /** Members with their roles. The owner changes a role in place and removes a member after being asked. */
 export function MemberList({ slug, members, ownId, mayChange }: Props) {
   const router = useRouter();
@@ -61,23 +79,16 @@ export function MemberList({ slug, members, ownId, mayChange }: Props) {
                 Remove {member.name}
               </Button>
             ) : null}
+            {leaving?.id === member.id ? (
+              <RemovalQuestion
+                name={member.name}
+                onKeep={() => setLeaving(null)}
+                onRemove={() => void run(() => apiSend(`/api/o/${slug}/members/${member.id}`, { method: "DELETE" }))}
+              />
+            ) : null}
           </li>
         ))}
       </ul>
-      {leaving ? (
-        <div className="notice">
-          <h3>Remove {leaving.name}?</h3>
-          <p>They are signed out everywhere at once and their API keys stop working. What they booked stays in their name.</p>
-          <div className="flex flex-wrap gap-4 pt-2">
-            <Button variant="line" onClick={() => setLeaving(null)}>
-              Keep {leaving.name}
-            </Button>
-            <Button variant="danger" onClick={() => void run(() => apiSend(`/api/o/${slug}/members/${leaving.id}`, { method: "DELETE" }))}>
-              Remove from the outfit
-            </Button>
-          </div>
-        </div>
-      ) : null}
     </div>
   );
 }

@@ -102,9 +102,9 @@ export function historyUntil(lastDay: string, yields: Yield): Day[] {
     }
     const weighed = GRADES.flatMap((grade): Happening[] => {
       const net = sums.get(grade.key) ?? 0;
-      if (net < 320) return [];
-      // A bench scale reads in steps of 0.05 lb.
-      const rounded = Math.trunc(net / 5) * 5;
+      if (net < 400) return [];
+      // The shop's floor scale reads in steps of 0.2 lb, like the yards'.
+      const rounded = Math.trunc(net / 20) * 20;
       const label = grade.bins[(bin.get(grade.key) ?? 0) % grade.bins.length] ?? grade.bins[0];
       held.set(grade.key, (held.get(grade.key) ?? 0) + rounded);
       return [{ what: "weigh-in", pickup: haulDone.ref, grade: grade.key, bin: label, gross: hundredths(rounded + grade.tare), tare: hundredths(grade.tare) }];
@@ -147,7 +147,7 @@ export function historyUntil(lastDay: string, yields: Yield): Day[] {
       if (day % cost.every === index + 1)
         happenings.push({ what: "cost", kind: cost.kind, amountMinor: random.between(cost.least, cost.most), note: cost.note });
     });
-    if (day > 20 && day % 37 === 0) happenings.push({ what: "count", bin: random.pick(GRADES).bins[0], lossHundredths: random.between(2, 40) * 5 });
+    if (day > 20 && day % 37 === 0) happenings.push({ what: "count", bin: random.pick(GRADES).bins[0], lossHundredths: random.between(1, 9) * 20 });
     days.push({ on, happenings });
   }
   return days;

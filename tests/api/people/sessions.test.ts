@@ -1,4 +1,5 @@
 import { eq } from "drizzle-orm";
+import { NextRequest } from "next/server";
 import { beforeEach, describe, expect, it } from "vitest";
 import * as invitations from "@/app/api/o/[outfit]/invitations/route";
 import * as member from "@/app/api/o/[outfit]/members/[id]/route";
@@ -103,6 +104,12 @@ describe("what is no session", () => {
   it.each(["", "x", "eyJhbGciOiJub25lIn0.e30.", "a.b.c.d.e"])("the cookie %j", async (value) => {
     expect(await statusOf({ cookie: `next-auth.session-token=${value}` })).toEqual([401, 401]);
   });
+});
+
+it("a path without brackets is called without parameters", async () => {
+  const request = new NextRequest("http://127.0.0.1:3000/api/me", { headers: await sessionOf(person) });
+  const answer = await me.GET(request, { params: Promise.resolve(undefined) });
+  expect(answer.status).toBe(200);
 });
 
 describe("changing the password", () => {
