@@ -17,7 +17,7 @@ export default async function CrewPage({ params }: { params: Promise<{ outfit: s
   const mayChange = can(ctx.actor.role, "members.change");
   const [{ items }, invitations] = await Promise.all([seeMembers(ctx), mayChange ? seeInvitations(ctx) : null]);
   return (
-    <div className="page">
+    <div className="narrow-page">
       <PageHead title="Crew" fact="Who works in this ledger, and as what." />
       <Panel title="Members" sub={String(items.length)}>
         <MemberList slug={slug} members={items} ownId={ctx.actor.memberId} mayChange={mayChange} />
