@@ -132,7 +132,7 @@ export class Teller {
       const held = await this.held(bin.id);
       if (!grades.includes(bin.grade) || !price || held < 200) continue;
       // Now and then a yard's scale reads the first line a little light.
-      const light = short && lines.length === 0 ? Math.trunc(held / 60) : 0;
+      const light: number = short && lines.length === 0 ? Math.trunc(held / 60) : 0;
       const net = Math.trunc((held - light) / 20) * 20;
       const amountMinor = lineAmount({ quantity: hundredths(net), unit: "lb", price: price.price, per: price.per, exponent: 2 });
       const tare = need(new Map<string, number>(GRADES.map((grade) => [grade.key, grade.tare])), bin.grade);
