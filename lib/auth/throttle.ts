@@ -1,4 +1,5 @@
 import "server-only";
+import type { Pool } from "mysql2/promise";
 import { RateLimiterMySQL } from "rate-limiter-flexible";
 import { databasePool } from "@/db/client";
 import { env } from "@/lib/env";
@@ -16,17 +17,22 @@ export const SIGN_IN_EMAIL: Rule = { name: "sign-in-email", points: 100, seconds
 export const SIGN_IN_KNOWN: Rule = { name: "sign-in-known", points: 1, seconds: 90 * 86_400 };
 /** Wrong present passwords while changing one. */
 export const PASSWORD_CHANGE: Rule = { name: "password-change", points: 10, seconds: 900 };
-export const SIGN_UP: Rule = { name: "sign-up", points: 20, seconds: 3600 };
+/** Generous, because without a proxy in front that names them all callers share one address. */
+export const SIGN_UP: Rule = { name: "sign-up", points: 300, seconds: 3600 };
 export const PUBLIC_READ: Rule = { name: "public", points: 600, seconds: 60 };
 
-const limiters = new Map<string, RateLimiterMySQL>();
+/** One limiter a rule, made anew when the pool was closed and opened again. */
+const limiters = new WeakMap<Pool, Map<string, RateLimiterMySQL>>();
 
 function limiter({ name, points, seconds }: Rule): RateLimiterMySQL {
-  const known = limiters.get(name);
+  const pool = databasePool();
+  const ofPool = limiters.get(pool) ?? new Map<string, RateLimiterMySQL>();
+  limiters.set(pool, ofPool);
+  const known = ofPool.get(name);
   if (known) return known;
   const made = new RateLimiterMySQL({
     // The library speaks the callback interface; its table comes from our own migrations.
-    storeClient: databasePool().pool,
+    storeClient: pool.pool,
     storeType: "pool",
     dbName: new URL(env().DATABASE_URL).pathname.slice(1),
     tableName: "rate_limits",
@@ -35,7 +41,7 @@ function limiter({ name, points, seconds }: Rule): RateLimiterMySQL {
     points,
     duration: seconds,
   });
-  limiters.set(name, made);
+  ofPool.set(name, made);
   return made;
 }
 
