@@ -11,7 +11,7 @@ export const SHORTEST_PASSWORD = 15;
 const emailField = z
   .string("Enter your email.")
   .trim()
-  .min(1, "Enter your email.")
+  .min(1, { error: "Enter your email.", abort: true })
   .max(254, "Email must be 254 letters or fewer.")
   .refine((text) => z.email().safeParse(text.normalize("NFKC")).success, "Email must be like name@example.com.");
 

@@ -85,6 +85,11 @@ describe("signing up", () => {
     expect(JSON.stringify(answer.problem)).not.toContain(PASSWORD);
   });
 
+  it("an empty form names each field once", async () => {
+    const answer = await call(signUps.POST, null, { body: input({ name: "", email: "", password: "" }) });
+    expect(answer.problem.errors?.map((error) => error.path)).toEqual(["name", "email", "password"]);
+  });
+
   it("V2.4.1: an address can do it so often and no more", async () => {
     for (let i = 0; i < SIGN_UP.points; i += 1) expect((await call(signUps.POST, null, { body: {} })).status).toBe(422);
     const refused = await call(signUps.POST, null, { body: input() });
