@@ -70,6 +70,7 @@ export function TicketForm({ slug, outfit, today, choices, start, kept, mayPost 
     [choices.prices, getValues, setValue],
   );
   const sheetFrom = choices.prices.find((price) => price.yardId === typed.yardId)?.inForceFrom ?? null;
+  const sheetWords = sheetFrom !== null ? formatShortDate(sheetFrom, { today }) : typed.yardId === "" ? "choose the yard" : "none in force";
   const wrongSums =
     read.totalMinor !== read.totalExpected ||
     typed.paperSaysSo ||
@@ -101,13 +102,7 @@ export function TicketForm({ slug, outfit, today, choices, start, kept, mayPost 
       />
       <ErrorSummary problems={errors.map((error) => (error.path === "" ? { message: error.message } : { field: error.path, message: error.message }))} />
       <Panel className="tk">
-        <TicketHeadFields
-          yards={choices.yards}
-          today={today}
-          sheetFrom={sheetFrom === null ? null : formatShortDate(sheetFrom, { today })}
-          register={register}
-          errorAt={errorAt}
-        />
+        <TicketHeadFields yards={choices.yards} today={today} sheetFrom={sheetWords} register={register} errorAt={errorAt} />
         <Perf />
         <h2 className="tk-title">On their ticket, and our check</h2>
         {fields.map((field, index) => {

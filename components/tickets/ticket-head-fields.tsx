@@ -8,7 +8,8 @@ import type { YardChoice } from "./choices";
 type Props = {
   yards: YardChoice[];
   today: string;
-  sheetFrom: string | null;
+  /** The day of the yard's sheet in force, or why there is none. */
+  sheetFrom: string;
   register: UseFormRegister<TypedTicket>;
   errorAt: (path: string) => string | undefined;
 };
@@ -29,7 +30,7 @@ export function TicketHeadFields({ yards, today, sheetFrom, register, errorAt }:
       <TextField id="ticketOn" label="Weighed" type="date" max={today} error={errorAt("ticketOn")} {...register("ticketOn")} />
       <div className="tk-fact">
         <small>Price sheet</small>
-        <b className="n">{sheetFrom ?? "none in force"}</b>
+        <b className="n">{sheetFrom}</b>
       </div>
     </div>
   );
