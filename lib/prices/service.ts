@@ -1,5 +1,5 @@
 import "server-only";
-import { and, eq, inArray } from "drizzle-orm";
+import { and, eq, inArray, sql } from "drizzle-orm";
 import { database } from "@/db/client";
 import { gradeAliases, grades, priceSheetLines, priceSheets, yards } from "@/db/schema";
 import { isDuplicateKey, type Transaction } from "@/db/transaction";
@@ -126,10 +126,12 @@ export async function rememberWordings(
   yardId: string,
   lines: { gradeId: string; yardWording?: string | undefined }[],
 ): Promise<void> {
-  for (const { gradeId, yardWording } of lines) {
-    if (yardWording === undefined) continue;
-    await tx.insert(gradeAliases).values({ outfitId: ctx.outfit.id, yardId, wording: yardWording, gradeId }).onDuplicateKeyUpdate({ set: { gradeId } });
-  }
+  const said = new Map(lines.flatMap(({ gradeId, yardWording }) => (yardWording === undefined ? [] : [[yardWording, gradeId] as const])));
+  if (said.size === 0) return;
+  await tx
+    .insert(gradeAliases)
+    .values([...said].map(([wording, gradeId]) => ({ outfitId: ctx.outfit.id, yardId, wording, gradeId })))
+    .onDuplicateKeyUpdate({ set: { gradeId: sql`values(grade_id)` } });
 }
 
 function dayTaken(error: unknown, yard: string): unknown {

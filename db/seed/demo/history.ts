@@ -27,6 +27,9 @@ export type Yield = Map<string, Map<string, number>>;
 /** How likely a find is, laid out as a hundred tickets to draw from. */
 const HAT = FINDS.flatMap((find) => Array.from({ length: find.share }, () => find));
 
+/** In hundredths of a pound. */
+const WORTH_WEIGHING = 900;
+
 const weekday = (on: string) => new Date(`${on}T00:00:00Z`).getUTCDay();
 
 /** Prices that move a little with every sheet, the same for all yards but for each yard's lean. */
@@ -63,6 +66,7 @@ export function historyUntil(lastDay: string, yields: Yield): Day[] {
   const days: Day[] = [];
   const open: Open[] = [];
   const held = new Map<string, number>();
+  const gathered = new Map<string, number>();
   const bin = new Map<string, number>();
   let ref = 0;
   let paper = 20_100;
@@ -101,8 +105,10 @@ export function historyUntil(lastDay: string, yields: Yield): Day[] {
         sums.set(grade, (sums.get(grade) ?? 0) + Math.trunc((weight * count * random.between(78, 104)) / 100));
     }
     const weighed = GRADES.flatMap((grade): Happening[] => {
-      const net = sums.get(grade.key) ?? 0;
-      if (net < 400) return [];
+      // Small parts gather on the bench until they are worth a walk to the scale.
+      const net = (gathered.get(grade.key) ?? 0) + (sums.get(grade.key) ?? 0);
+      gathered.set(grade.key, net < WORTH_WEIGHING ? net : 0);
+      if (net < WORTH_WEIGHING) return [];
       // The shop's floor scale reads in steps of 0.2 lb, like the yards'.
       const rounded = Math.trunc(net / 20) * 20;
       const label = grade.bins[(bin.get(grade.key) ?? 0) % grade.bins.length] ?? grade.bins[0];
