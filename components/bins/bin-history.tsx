@@ -3,11 +3,15 @@ import { LedgerTable, RowHead, Td, Th } from "@/components/ui/ledger-table";
 import { Panel } from "@/components/ui/panel";
 import type { Count, WeighIn } from "@/lib/bins/schema";
 import { formatDate, formatWeight } from "@/lib/format";
+import { TakeBack } from "./take-back";
 
-type Props = { weighIns: WeighIn[]; counts: Count[]; unit: string; today: string };
+/** Who looks, so that each sees a way back beside what they may take back. */
+type Viewer = { memberId: string; isOwner: boolean; mayWeigh: boolean; mayCount: boolean };
+type Props = { slug: string; weighIns: WeighIn[]; counts: Count[]; unit: string; today: string; viewer: Viewer };
 
 /** The last weigh-ins into a bin and the last counts of it. */
-export function BinHistory({ weighIns, counts, unit, today }: Props) {
+export function BinHistory({ slug, weighIns, counts, unit, today, viewer }: Props) {
+  const own = (record: { madeBy: { id: string } }) => viewer.isOwner || record.madeBy.id === viewer.memberId;
   return (
     <>
       <Panel title="Weighed in" sub="the last ones">
@@ -29,6 +33,9 @@ export function BinHistory({ weighIns, counts, unit, today }: Props) {
                 <Th numeric unit={unit}>
                   Net
                 </Th>
+                <Th>
+                  <span className="vh">Taking back</span>
+                </Th>
               </tr>
             </thead>
             <tbody>
@@ -39,7 +46,15 @@ export function BinHistory({ weighIns, counts, unit, today }: Props) {
                   <Td>{weighIn.madeBy.name}</Td>
                   <Td numeric>{formatWeight(weighIn.gross, { places: 2 })}</Td>
                   <Td numeric>{formatWeight(weighIn.tare, { places: 2 })}</Td>
-                  <Td numeric>{weighIn.voidedAt ? "taken back" : <b>{formatWeight(weighIn.net, { places: 2 })}</b>}</Td>
+                  <Td numeric>{weighIn.voidedAt ? <s>{formatWeight(weighIn.net, { places: 2 })}</s> : <b>{formatWeight(weighIn.net, { places: 2 })}</b>}</Td>
+                  <Td>
+                    <TakeBack
+                      path={`/api/o/${slug}/weigh-ins/${weighIn.id}`}
+                      what={`the weigh-in of ${formatWeight(weighIn.net, { places: 2 })} ${unit}`}
+                      voided={weighIn.voidedAt !== null}
+                      may={viewer.mayWeigh && own(weighIn)}
+                    />
+                  </Td>
                 </tr>
               ))}
             </tbody>
@@ -62,6 +77,9 @@ export function BinHistory({ weighIns, counts, unit, today }: Props) {
                 <Th numeric unit={unit}>
                   Difference
                 </Th>
+                <Th>
+                  <span className="vh">Taking back</span>
+                </Th>
               </tr>
             </thead>
             <tbody>
@@ -71,7 +89,21 @@ export function BinHistory({ weighIns, counts, unit, today }: Props) {
                   <Td>{count.madeBy.name}</Td>
                   <Td numeric>{formatWeight(count.bookQuantity, { places: 2 })}</Td>
                   <Td numeric>{formatWeight(count.net, { places: 2 })}</Td>
-                  <Td numeric>{count.voidedAt ? "taken back" : formatWeight(count.difference, { places: 2, sign: true })}</Td>
+                  <Td numeric>
+                    {count.voidedAt ? (
+                      <s>{formatWeight(count.difference, { places: 2, sign: true })}</s>
+                    ) : (
+                      formatWeight(count.difference, { places: 2, sign: true })
+                    )}
+                  </Td>
+                  <Td>
+                    <TakeBack
+                      path={`/api/o/${slug}/counts/${count.id}`}
+                      what={`the count of ${formatWeight(count.net, { places: 2 })} ${unit}`}
+                      voided={count.voidedAt !== null}
+                      may={viewer.mayCount && own(count)}
+                    />
+                  </Td>
                 </tr>
               ))}
             </tbody>

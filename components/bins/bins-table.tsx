@@ -12,6 +12,8 @@ import { columnsFor, features } from "./bins-columns";
 type Props = { slug: string; rows: BinsRow[]; unit: string; currency: string; chosen: string | null; cost: boolean; prices: boolean };
 
 const LEFT = new Set(["name", "yard", "sellPoint"]);
+// Names sort from A first, figures from the largest.
+const NAMES = new Set(["name", "yard"]);
 const DIRECTIONS = { asc: "ascending", desc: "descending" } as const;
 
 /** What is held by grade, with totals; a press on a head sorts by it, and a grade opens beside the table. */
@@ -37,7 +39,10 @@ export function BinsTable({ slug, rows, unit, currency, chosen, cost, prices }: 
                   key={header.id}
                   numeric={!LEFT.has(header.column.id)}
                   unit={units[header.column.id]}
-                  sort={{ direction: sorted === false ? "none" : DIRECTIONS[sorted], onSort: () => header.column.toggleSorting(sorted !== "desc") }}
+                  sort={{
+                    direction: sorted === false ? "none" : DIRECTIONS[sorted],
+                    onSort: () => header.column.toggleSorting(NAMES.has(header.column.id) ? sorted === "asc" : sorted !== "desc"),
+                  }}
                 >
                   <table.FlexRender header={header} />
                 </Th>

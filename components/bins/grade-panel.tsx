@@ -6,9 +6,20 @@ import { GradeTag } from "@/components/ui/tag";
 import type { BinsRow } from "@/lib/bins/pages";
 import type { Bin } from "@/lib/bins/schema";
 import { formatAge, formatMoney, formatMoneyPlain, formatPrice, formatShortDate, formatWeight } from "@/lib/format";
+import { counted } from "./words";
 
 type YardOffer = { yardId: string; yardName: string; inForceFrom: string; price: string; ageDays: number; soldMinor: number };
-type Props = { slug: string; row: BinsRow; yards: YardOffer[]; bins: Bin[]; unit: string; currency: string; today: string; prices: boolean };
+type Props = {
+  slug: string;
+  row: BinsRow;
+  yards: YardOffer[];
+  bins: Bin[];
+  unit: string;
+  currency: string;
+  today: string;
+  prices: boolean;
+  may: { weigh: boolean; sell: boolean };
+};
 
 function Offers({ yards, unit, currency, today }: Pick<Props, "yards" | "unit" | "currency" | "today">) {
   return (
@@ -42,16 +53,17 @@ function Offers({ yards, unit, currency, today }: Pick<Props, "yards" | "unit" |
 }
 
 /** The chosen grade: what is held, what each yard would pay, and which bins it stands in. */
-export function GradePanel({ slug, row, yards, bins, unit, currency, today, prices }: Props) {
+export function GradePanel({ slug, row, yards, bins, unit, currency, today, prices, may }: Props) {
   return (
     <Panel>
       <div className="in grid gap-3 pt-3">
-        <div>
+        <div className="flex flex-wrap items-center justify-between gap-2">
           <GradeTag family={row.family} name={row.name} />
+          {row.daysHeld === null ? null : <span className="mut">oldest {counted(row.daysHeld, "day", "days")}</span>}
         </div>
         <dl className="held-figures">
           <div>
-            <dt>in {row.bins === 1 ? "1 bin" : `${row.bins} bins`}</dt>
+            <dt>in {counted(row.bins, "bin", "bins")}</dt>
             <dd className="n">
               {formatWeight(row.quantity)}
               <span className="u">{unit}</span>
@@ -86,12 +98,12 @@ export function GradePanel({ slug, row, yards, bins, unit, currency, today, pric
           ))}
         </ul>
         <div className="flex flex-wrap gap-3 pt-2">
-          {bins[0] ? (
+          {may.weigh && bins[0] ? (
             <Button variant="line" href={`/o/${slug}/bins/weigh-in?bin=${bins[0].id}`}>
               Weigh in
             </Button>
           ) : null}
-          <Button href={`/o/${slug}/tickets/new`}>Record a ticket</Button>
+          {may.sell ? <Button href={`/o/${slug}/tickets/new`}>Record a ticket</Button> : null}
         </div>
       </div>
     </Panel>

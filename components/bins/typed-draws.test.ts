@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { addDraw, drawsOf, readDraws } from "./typed-draws";
+import { addDraw, drawsOf, fieldOf, readDraws } from "./typed-draws";
 
 describe("weights typed at the bench", () => {
   it("a comma decimal is read as a decimal, not as ten times the weight", () => {
@@ -25,8 +25,16 @@ describe("weights typed at the bench", () => {
     expect(drawsOf([{ gross: "abc", tare: "" }], "lb")).toEqual({ gross: "abc", tare: "0" });
   });
 
-  it("no empty draw is put under an empty draw", () => {
+  it("no draw is put under one that puts nothing in", () => {
     expect(addDraw([{ gross: "", tare: "2" }], "2", "lb")).toHaveLength(1);
+    expect(addDraw([{ gross: "1", tare: "2" }], "2", "lb")).toHaveLength(1);
     expect(addDraw([{ gross: "5", tare: "2" }], "2", "lb")).toHaveLength(2);
+  });
+
+  it("a message about an earlier draw leads to its row, one about the last draw to the readout", () => {
+    expect(fieldOf("draws.0.tare", 2)).toBe("draw-0");
+    expect(fieldOf("draws.1.tare", 2)).toBe("tare");
+    expect(fieldOf("gross", 1)).toBe("gross");
+    expect(fieldOf("binId", 1)).toBe("binId");
   });
 });

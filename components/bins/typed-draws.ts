@@ -1,4 +1,4 @@
-import { subtract, sum } from "@/lib/arithmetic/decimal";
+import { isPositive, subtract, sum } from "@/lib/arithmetic/decimal";
 import { readNumber } from "@/lib/arithmetic/read-number";
 
 /** A container on the scale as it is typed. */
@@ -19,9 +19,18 @@ export function readDraws(draws: TypedDraw[], unit: string): { net: string | nul
   return { net: nets.length === 0 ? null : sum(nets) };
 }
 
-/** A new draw under the others, unless the last one is still empty. */
-export const addDraw = (draws: TypedDraw[], tare: string, unit: string): TypedDraw[] =>
-  readDraws(draws.slice(-1), unit).net === null ? draws : [...draws, { gross: "", tare }];
+/** A new draw under the others, unless the last one puts nothing in yet. */
+export function addDraw(draws: TypedDraw[], tare: string, unit: string): TypedDraw[] {
+  const { net } = readDraws(draws.slice(-1), unit);
+  return net !== null && isPositive(net) ? [...draws, { gross: "", tare }] : draws;
+}
+
+/** The field a message about the draws belongs to: the readout for the draw that is typed now, the row of the draw before it. */
+export function fieldOf(path: string, drawCount: number): string {
+  const [, index, field] = /^draws\.(\d+)\.(gross|tare)$/.exec(path) ?? [];
+  if (index === undefined || field === undefined) return path;
+  return index === String(drawCount - 1) ? field : `draw-${index}`;
+}
 
 /** The draws as the API takes them. Text that is no number stays, so that the check names its field; a last draw left empty is left out. */
 export function drawsOf(draws: TypedDraw[], unit: string): { gross: string; tare: string } | { draws: TypedDraw[] } {

@@ -3,7 +3,7 @@
 import { useRouter } from "next/navigation";
 import { useRef, useState } from "react";
 import { useApiForm } from "@/components/forms/use-api-form";
-import { BigButton, Button } from "@/components/ui/button";
+import { BigButton } from "@/components/ui/button";
 import { Dock } from "@/components/ui/dock";
 import { ErrorSummary } from "@/components/ui/error-summary";
 import { Icon } from "@/components/ui/icons";
@@ -15,10 +15,11 @@ import { weighInInputSchema, type Bin, type WeighIn } from "@/lib/bins/schema";
 import { formatWeight } from "@/lib/format";
 import { apiSend } from "@/lib/http/fetch";
 import { BinPicker } from "./bin-picker";
+import { DrawList } from "./draw-list";
 import { GradePicker, type GradeChoice } from "./grade-picker";
 import { SourcePicker, type LotChoice, type Source } from "./source-picker";
 import { TodaysWeighIns } from "./todays-weigh-ins";
-import { addDraw, drawsOf, readDraws, type TypedDraw } from "./typed-draws";
+import { addDraw, drawsOf, fieldOf, readDraws, type TypedDraw } from "./typed-draws";
 import { useWakeLock } from "./use-wake-lock";
 
 type Props = {
@@ -30,7 +31,7 @@ type Props = {
   memberId: string;
   isOwner: boolean;
   mayAddBin: boolean;
-  presetPickup: string | null;
+  presetPickup: LotChoice | null;
   presetBin: string | null;
 };
 
@@ -45,13 +46,13 @@ export function WeighInForm(props: Props) {
   const [gradeId, setGradeId] = useState(firstBin?.gradeId ?? "");
   const [binId, setBinId] = useState(firstBin?.id ?? "");
   const [draws, setDraws] = useState<TypedDraw[]>([{ gross: "", tare: shownTare(firstBin?.tare ?? "0") }]);
-  const [source, setSource] = useState<Source>(props.presetPickup ? { from: "pickup", pickupId: props.presetPickup } : { from: "outside" });
+  const [source, setSource] = useState<Source>(props.presetPickup ? { from: "pickup", lot: props.presetPickup } : { from: "outside" });
   const [done, setDone] = useState("");
   useWakeLock();
   const bin = screen.bins.find((one) => one.id === binId);
   const read = readDraws(draws, unit);
   const last = draws.at(-1) ?? { gross: "", tare: "" };
-  const { submit, sending, errors, errorAt } = useApiForm<typeof weighInInputSchema, WeighIn>({
+  const { submit, sending, errors } = useApiForm<typeof weighInInputSchema, WeighIn>({
     schema: weighInInputSchema,
     send: (input, idempotencyKey) => apiSend(`/api/o/${slug}/weigh-ins`, { body: input, idempotencyKey }),
     onDone: (made) => {
@@ -63,7 +64,7 @@ export function WeighInForm(props: Props) {
   });
   const chooseBin = (next: Bin | undefined) => {
     setBinId(next?.id ?? "");
-    setDraws([{ gross: last.gross, tare: shownTare(next?.tare ?? "0") }]);
+    setDraws([...draws.slice(0, -1), { gross: last.gross, tare: shownTare(next?.tare ?? "0") }]);
   };
   const chooseGrade = (id: string) => {
     setGradeId(id);
@@ -72,11 +73,15 @@ export function WeighInForm(props: Props) {
   const change = (field: keyof TypedDraw) => (event: { target: { value: string } }) =>
     setDraws([...draws.slice(0, -1), { ...last, [field]: event.target.value }]);
   const send = () => {
-    const from = source.from === "pickup" ? { pickupId: source.pickupId } : source.from === "pile" ? { fromPile: true } : {};
+    const from = source.from === "pickup" ? { pickupId: source.lot.id } : source.from === "pile" ? { fromPile: true } : {};
     setDone("");
     return submit({ binId, weighedOn: today, ...drawsOf(draws, unit), ...from } as never);
   };
-  const lastError = (field: string) => errorAt(field) ?? errorAt(`draws.${draws.length - 1}.${field}`);
+  const messageAt = (field: string) => errors.find(({ path }) => fieldOf(path, draws.length) === field)?.message;
+  const wrong = (field: string) => {
+    const error = messageAt(field);
+    return error ? { error } : {};
+  };
   return (
     <form
       noValidate
@@ -96,7 +101,7 @@ export function WeighInForm(props: Props) {
         }
       />
       <div className="body weigh">
-        <ErrorSummary problems={errors.map(({ path, message }) => (path === "" ? { message } : { field: path.replace(/^draws\.\d+\./, ""), message }))} />
+        <ErrorSummary problems={errors.map(({ path, message }) => (path === "" ? { message } : { field: fieldOf(path, draws.length), message }))} />
         <GradePicker grades={screen.grades} chosen={gradeId} onChoose={chooseGrade} />
         <BinPicker
           slug={slug}
@@ -110,22 +115,24 @@ export function WeighInForm(props: Props) {
         <Readout
           unit={unit}
           net={read.net === null ? "–" : formatWeight(read.net, { places: 2 })}
-          gross={{
-            id: "gross",
-            ref: grossRef,
-            value: last.gross,
-            onChange: change("gross"),
-            ...(lastError("gross") ? { error: lastError("gross") ?? "" } : {}),
-          }}
-          tare={{ id: "tare", value: last.tare, onChange: change("tare"), ...(lastError("tare") ? { error: lastError("tare") ?? "" } : {}) }}
+          gross={{ id: "gross", ref: grossRef, value: last.gross, onChange: change("gross"), ...wrong("gross") }}
+          tare={{ id: "tare", value: last.tare, onChange: change("tare"), ...wrong("tare") }}
+          netLabel={draws.length > 1 ? `net of ${draws.length} draws` : "net"}
         />
-        <div className="draws">
-          <Button variant="line" onClick={() => setDraws(addDraw(draws, shownTare(bin?.tare ?? "0"), unit))}>
-            Add another draw
-          </Button>
-          {draws.length > 1 ? <span className="n">{`${draws.length} draws in this weigh-in`}</span> : null}
-        </div>
-        <SourcePicker lots={screen.lots} source={source} unit={unit} onChange={setSource} error={errorAt("pickupId")} />
+        <DrawList
+          draws={draws}
+          unit={unit}
+          errorOf={(index) => messageAt(`draw-${index}`)}
+          onAdd={() => {
+            setDraws(addDraw(draws, shownTare(bin?.tare ?? "0"), unit));
+            grossRef.current?.focus();
+          }}
+          onRemove={(index) => {
+            setDraws(draws.filter((_, at) => at !== index));
+            grossRef.current?.focus();
+          }}
+        />
+        <SourcePicker lots={screen.lots} source={source} unit={unit} onChange={setSource} error={messageAt("pickupId")} />
         <LiveRegion className="done">{done}</LiveRegion>
         <TodaysWeighIns slug={slug} weighIns={screen.today} unit={unit} timeZone={props.timeZone} memberId={props.memberId} isOwner={props.isOwner} />
       </div>

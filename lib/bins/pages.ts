@@ -33,6 +33,8 @@ export async function weighInScreen(ctx: Context) {
 /** A grade's row on the bins page. What the member may not see is null. */
 export type BinsRow = Omit<GradeHolding, "costMinor"> & {
   averageCost: string | null;
+  /** What the stock of the grade cost. */
+  costMinor: number | null;
   best: { price: string; yardName: string; ageDays: number; stale: boolean } | null;
   valueMinor: number | null;
   daysHeld: number | null;
@@ -49,6 +51,7 @@ function rowOf(ctx: Context, holding: GradeHolding, best: ReturnType<typeof best
   return {
     ...rest,
     averageCost: seesCost(ctx.actor.role) && !empty ? divide(decimalFromMinor(costMinor, exponent), holding.quantity, 4) : null,
+    costMinor: seesCost(ctx.actor.role) ? costMinor : null,
     best: price ? { price: roundTo(price.normalised, 4), yardName: price.yardName, ageDays, stale: ageDays > staleAfterDays } : null,
     valueMinor: price ? lineAmount({ quantity: holding.quantity, unit: weightUnit, price: price.price, per: price.per, exponent }) : null,
     daysHeld: holding.heldSince === null ? null : daysBetween(holding.heldSince, ctx.today),

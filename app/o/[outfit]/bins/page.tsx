@@ -1,6 +1,7 @@
 import type { Metadata } from "next";
 import { BinsTable } from "@/components/bins/bins-table";
 import { GradePanel } from "@/components/bins/grade-panel";
+import { counted } from "@/components/bins/words";
 import { Button } from "@/components/ui/button";
 import { EmptyState } from "@/components/ui/empty-state";
 import { PageHead } from "@/components/ui/page-head";
@@ -46,7 +47,7 @@ export default async function BinsPage({
       <div className="full">
         <PageHead
           title="Bins"
-          fact={`${binCount} bins, ${rows.length} grades.${prices ? " Value is weight at the best current price sheet." : ""}`}
+          fact={`${counted(binCount, "bin", "bins")}, ${counted(rows.length, "grade", "grades")}.${prices ? " Value is weight at the best current price sheet." : ""}`}
           actions={actions}
         />
       </div>
@@ -60,7 +61,17 @@ export default async function BinsPage({
         )}
       </Panel>
       {chosen ? (
-        <GradePanel slug={slug} row={chosen} yards={yards} bins={bins} unit={weightUnit} currency={currency} today={ctx.today} prices={prices} />
+        <GradePanel
+          slug={slug}
+          row={chosen}
+          yards={yards}
+          bins={bins}
+          unit={weightUnit}
+          currency={currency}
+          today={ctx.today}
+          prices={prices}
+          may={{ weigh: can(role, "weigh-ins.make"), sell: can(role, "tickets.draft") }}
+        />
       ) : null}
     </div>
   );

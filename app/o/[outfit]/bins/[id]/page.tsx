@@ -1,5 +1,6 @@
 import type { Metadata } from "next";
 import { notFound } from "next/navigation";
+import { BinFacts } from "@/components/bins/bin-facts";
 import { BinForm } from "@/components/bins/bin-form";
 import { BinHistory } from "@/components/bins/bin-history";
 import { PutAway } from "@/components/bins/put-away";
@@ -43,7 +44,15 @@ export default async function BinPage({ params }: { params: Promise<{ outfit: st
         fact={`${bin.gradeName}, ${formatWeight(bin.balance)} ${unit} in it${bin.putAwayAt ? ", put away" : ""}.`}
         actions={actions}
       />
-      <BinHistory weighIns={weighIns} counts={counts} unit={unit} today={ctx.today} />
+      <BinFacts bin={bin} unit={unit} />
+      <BinHistory
+        slug={slug}
+        weighIns={weighIns}
+        counts={counts}
+        unit={unit}
+        today={ctx.today}
+        viewer={{ memberId: ctx.actor.memberId, isOwner: role === "owner", mayWeigh: can(role, "weigh-ins.void"), mayCount: can(role, "counts.void") }}
+      />
       {can(role, "bins.change") ? (
         <>
           <BinForm slug={slug} unit={unit} grades={[]} kept={bin} />

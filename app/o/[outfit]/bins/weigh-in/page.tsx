@@ -6,6 +6,7 @@ import { PhoneBar } from "@/components/ui/phone-bar";
 import { pageContextFor } from "@/lib/auth/page";
 import { can } from "@/lib/auth/permissions";
 import { weighInScreen } from "@/lib/bins/pages";
+import { getPickupPage } from "@/lib/pickups/pages";
 
 export const metadata: Metadata = { title: "Weigh in" };
 
@@ -16,6 +17,7 @@ export default async function WeighInPage({ params, searchParams }: { params: Pr
   const { outfit: slug } = await params;
   const ctx = await pageContextFor(slug, "weigh-ins.make");
   const [screen, search] = await Promise.all([weighInScreen(ctx), searchParams]);
+  const pickup = typeof search.pickup === "string" ? ((await getPickupPage(ctx, search.pickup))?.pickup ?? null) : null;
   const mayAddBin = can(ctx.actor.role, "bins.change");
   if (screen.bins.length === 0) {
     return (
@@ -39,7 +41,7 @@ export default async function WeighInPage({ params, searchParams }: { params: Pr
       memberId={ctx.actor.memberId}
       isOwner={ctx.actor.role === "owner"}
       mayAddBin={mayAddBin}
-      presetPickup={screen.lots.find((lot) => lot.id === search.pickup)?.id ?? null}
+      presetPickup={pickup?.state === "open" ? { id: pickup.id, number: pickup.number, place: pickup.place, remainingWeight: pickup.remainingWeight } : null}
       presetBin={screen.bins.find((bin) => bin.id === search.bin)?.id ?? null}
     />
   );
