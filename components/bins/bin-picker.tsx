@@ -15,7 +15,9 @@ export function BinPicker({ slug, bins, gradeId, chosen, unit, mayAdd, onChoose 
     <div className="bin-row">
       {bins.length === 0 ? <p>No bin of this grade yet.</p> : null}
       {bins.length === 0 ? null : (
+        // As wide as its bins need, so that "New bin" stands beside them where there is room.
         <ChipGroup
+          className={bins.length > 2 ? "of-grade many" : "of-grade"}
           legend="Bin"
           hideLegend
           name="binId"

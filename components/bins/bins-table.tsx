@@ -28,7 +28,7 @@ export function BinsTable({ slug, rows, unit, currency, chosen, cost, prices }: 
   };
   const ripe = rows.filter((row) => (row.percent ?? 0) >= 100).length;
   return (
-    <LedgerTable caption="What the bins hold, by grade, with totals. The heads sort." rows="roomy">
+    <LedgerTable caption="What the bins hold, by grade, with totals. The heads sort." rows="roomy" className="by-grade">
       <thead>
         {table.getHeaderGroups().map((group) => (
           <tr key={group.id}>

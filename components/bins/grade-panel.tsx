@@ -75,12 +75,18 @@ export function GradePanel({ slug, row, yards, bins, unit, currency, today, pric
               <dd className="n">{formatMoney(row.valueMinor, currency)}</dd>
             </div>
           )}
+          {row.costMinor === null ? null : (
+            <div>
+              <dt>cost us</dt>
+              <dd className="n">{formatMoney(row.costMinor, currency)}</dd>
+            </div>
+          )}
         </dl>
       </div>
       {prices && yards.length > 0 ? <Offers yards={yards} unit={unit} currency={currency} today={today} /> : null}
       {prices && yards.length === 0 ? <p className="in">No yard has it on a sheet in force.</p> : null}
-      <div className="in">
-        <h3>Where it stands</h3>
+      <div className="in stands">
+        <h2>Where it stands</h2>
         <ul className="people">
           {bins.map((bin) => (
             <li key={bin.id}>

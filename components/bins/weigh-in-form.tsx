@@ -37,6 +37,9 @@ type Props = {
 
 const shownTare = (tare: string) => formatWeight(tare, { places: 2 }).replaceAll(",", "");
 
+const booked = ({ net, binLabel, binBalance }: WeighIn, unit: string) =>
+  `${formatWeight(net, { places: 2 })} ${unit} in ${binLabel}, which holds ${formatWeight(binBalance)} ${unit}.`;
+
 /** The bench scale's screen: choose the grade and its bin, type gross and tare, put it in. */
 export function WeighInForm(props: Props) {
   const { slug, unit, screen, today } = props;
@@ -47,7 +50,7 @@ export function WeighInForm(props: Props) {
   const [binId, setBinId] = useState(firstBin?.id ?? "");
   const [draws, setDraws] = useState<TypedDraw[]>([{ gross: "", tare: shownTare(firstBin?.tare ?? "0") }]);
   const [source, setSource] = useState<Source>(props.presetPickup ? { from: "pickup", lot: props.presetPickup } : { from: "outside" });
-  const [done, setDone] = useState("");
+  const [made, setMade] = useState<WeighIn | null>(null);
   useWakeLock();
   const bin = screen.bins.find((one) => one.id === binId);
   const read = readDraws(draws, unit);
@@ -55,8 +58,8 @@ export function WeighInForm(props: Props) {
   const { submit, sending, errors } = useApiForm<typeof weighInInputSchema, WeighIn>({
     schema: weighInInputSchema,
     send: (input, idempotencyKey) => apiSend(`/api/o/${slug}/weigh-ins`, { body: input, idempotencyKey }),
-    onDone: (made) => {
-      setDone(`${formatWeight(made.net, { places: 2 })} ${unit} in ${made.binLabel}, which holds ${formatWeight(made.binBalance)} ${unit}.`);
+    onDone: (weighIn) => {
+      setMade(weighIn);
       setDraws([{ gross: "", tare: shownTare(bin?.tare ?? "0") }]);
       grossRef.current?.focus();
       router.refresh();
@@ -74,9 +77,11 @@ export function WeighInForm(props: Props) {
     setDraws([...draws.slice(0, -1), { ...last, [field]: event.target.value }]);
   const send = () => {
     const from = source.from === "pickup" ? { pickupId: source.lot.id } : source.from === "pile" ? { fromPile: true } : {};
-    setDone("");
+    setMade(null);
     return submit({ binId, weighedOn: today, ...drawsOf(draws, unit), ...from } as never);
   };
+  // What was said of a weigh-in is no longer so once it is taken back.
+  const stands = screen.today.some((one) => one.id === made?.id && one.voidedAt !== null) ? null : made;
   const messageAt = (field: string) => errors.find(({ path }) => fieldOf(path, draws.length) === field)?.message;
   const wrong = (field: string) => {
     const error = messageAt(field);
@@ -133,7 +138,7 @@ export function WeighInForm(props: Props) {
           }}
         />
         <SourcePicker lots={screen.lots} source={source} unit={unit} onChange={setSource} error={messageAt("pickupId")} />
-        <LiveRegion className="done">{done}</LiveRegion>
+        <LiveRegion className="done">{stands ? booked(stands, unit) : null}</LiveRegion>
         <TodaysWeighIns slug={slug} weighIns={screen.today} unit={unit} timeZone={props.timeZone} memberId={props.memberId} isOwner={props.isOwner} />
       </div>
       <Dock>
