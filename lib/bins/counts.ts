@@ -10,7 +10,8 @@ import { reverseDocument } from "@/lib/books/reverse";
 import { audit, transact } from "@/lib/books/transact";
 import { AppError, fieldError, notFound } from "@/lib/http/errors";
 import { newId } from "@/lib/ids";
-import { getBin, getCount, listCounts } from "./queries";
+import { requireBinInUse } from "./in-use";
+import { getCount, listCounts } from "./queries";
 import { countBooking } from "./rules";
 import type { Count, CountInput, CountListQuery } from "./schema";
 
@@ -28,14 +29,13 @@ async function requireCount(db: Parameters<typeof getCount>[0], ctx: Context, id
 
 /**
  * Weighs a bin to correct the book: the difference goes to or comes from variance, at the moving average. A count that agrees is kept and books
- * nothing. Throws `input` for tare over gross or a day that lies ahead.
+ * nothing. Throws `input` for tare over gross or a day that lies ahead, `conflict` for a bin put away.
  */
 export async function countBin(ctx: Context, input: CountInput): Promise<Count> {
   if (input.countedOn > ctx.today) throw fieldError("countedOn", "Date must be today or earlier.");
   return transact(ctx, async (tx) => {
     const books = await openBooks(tx, ctx);
-    const bin = await getBin(tx, { outfitId: ctx.outfit.id, id: input.binId });
-    if (!bin) throw fieldError("binId", "There is no such bin here.");
+    const bin = await requireBinInUse(books, input.binId);
     const tare = input.tare ?? bin.tare;
     const net = netWeight({ gross: input.gross, tare });
     if (isNegative(net))

@@ -17,7 +17,7 @@ const RECENT = 40;
 export async function weighInScreen(ctx: Context) {
   const db = database();
   const outfitId = ctx.outfit.id;
-  const [bins, recent, lots] = await Promise.all([listBins(db, { outfitId }), listWeighIns(db, { outfitId, limit: RECENT }), openLots(db, { outfitId })]);
+  const [bins, recent, lots] = await Promise.all([binsInUse(ctx), listWeighIns(db, { outfitId, limit: RECENT }), openLots(db, { outfitId })]);
   const order = new Map<string, number>();
   for (const weighIn of recent.items) if (!order.has(weighIn.gradeId)) order.set(weighIn.gradeId, order.size);
   const grades = new Map<string, { id: string; name: string; family: Bin["family"] }>();
@@ -100,4 +100,6 @@ export async function binScreen(ctx: Context, id: string) {
 }
 
 /** Every bin in use, for pickers. */
-export const binsInUse = (ctx: Context): Promise<Bin[]> => listBins(database(), { outfitId: ctx.outfit.id });
+export async function binsInUse(ctx: Context): Promise<Bin[]> {
+  return (await listBins(database(), { outfitId: ctx.outfit.id })).filter((bin) => bin.putAwayAt === null);
+}

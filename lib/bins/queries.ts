@@ -1,5 +1,5 @@
 import "server-only";
-import { and, asc, desc, eq, gte, isNull, lt, lte, or, sql } from "drizzle-orm";
+import { and, asc, desc, eq, gt, gte, isNull, lt, lte, or, sql } from "drizzle-orm";
 import type { Reader } from "@/db/client";
 import { binBalances, bins, counts, grades, gradeStock, lots, memberships, movementLines, movements, pickups, users, weighIns } from "@/db/schema";
 import { trim } from "@/lib/arithmetic/decimal";
@@ -40,13 +40,16 @@ const binOf = ({ position: _position, quantity, ...row }: BinRow): Bin => ({
   putAwayAt: row.putAwayAt?.toISOString() ?? null,
 });
 
-/** The outfit's bins in the order of the grades, those in use unless `all`. There are few, so one page holds them. */
+/** In use, or put away and yet holding metal that a void gave back: what is held is never out of sight. */
+const inUseOrHolding = or(isNull(bins.putAwayAt), gt(binBalances.quantity, "0"));
+
+/** The outfit's bins in the order of the grades, those in use or not empty unless `all`. There are few, so one page holds them. */
 export async function listBins(
   db: Reader,
   { outfitId, all = false, gradeId }: { outfitId: string; all?: boolean; gradeId?: string | undefined },
 ): Promise<Bin[]> {
   const rows = await selectBins(db)
-    .where(and(eq(bins.outfitId, outfitId), all ? undefined : isNull(bins.putAwayAt), gradeId ? eq(bins.gradeId, gradeId) : undefined))
+    .where(and(eq(bins.outfitId, outfitId), all ? undefined : inUseOrHolding, gradeId ? eq(bins.gradeId, gradeId) : undefined))
     .orderBy(asc(grades.position), asc(bins.label));
   return rows.map(binOf);
 }
@@ -70,7 +73,7 @@ export type GradeHolding = {
   sellPoint: string | null;
 };
 
-/** Every grade that has a bin in use, in the catalogue's order. One query. */
+/** Every grade that has a bin in use or not empty, in the catalogue's order. One query. */
 export async function gradeStockList(db: Reader, { outfitId }: { outfitId: string }): Promise<GradeHolding[]> {
   const rows = await db
     .select({
@@ -87,7 +90,7 @@ export async function gradeStockList(db: Reader, { outfitId }: { outfitId: strin
     .innerJoin(grades, and(eq(grades.outfitId, bins.outfitId), eq(grades.id, bins.gradeId)))
     .leftJoin(binBalances, and(eq(binBalances.outfitId, bins.outfitId), eq(binBalances.binId, bins.id)))
     .leftJoin(gradeStock, and(eq(gradeStock.outfitId, bins.outfitId), eq(gradeStock.gradeId, bins.gradeId)))
-    .where(and(eq(bins.outfitId, outfitId), isNull(bins.putAwayAt)))
+    .where(and(eq(bins.outfitId, outfitId), inUseOrHolding))
     .groupBy(grades.id, grades.name, grades.family, grades.position, gradeStock.quantity, gradeStock.costMinor)
     .orderBy(asc(grades.position));
   return rows.map((row) => ({

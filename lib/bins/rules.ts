@@ -13,6 +13,12 @@ export function weighed(draws: TypedDraw[], unit: WeightUnit, bookUnit: "lb" | "
   return { gross, tare, net: netWeight({ gross, tare }) };
 }
 
+/** A single weight is typed below this; converted or added up it must still be. Far above any scale, far below what a column holds. */
+const BOOK_LIMIT: DecimalString = "10000000";
+
+/** Whether a weight in the book unit is one that the book takes. */
+export const fitsTheBook = (weight: DecimalString): boolean => compare(weight, BOOK_LIMIT) < 0;
+
 /** What is wrong with the draws, by the path of the field; empty when nothing is. */
 export function drawProblems(draws: TypedDraw[], several: boolean): { path: string; message: string }[] {
   return draws.flatMap((draw, index) => {

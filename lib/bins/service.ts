@@ -1,8 +1,8 @@
 import "server-only";
 import { and, eq } from "drizzle-orm";
 import { database } from "@/db/client";
-import { bins, grades, movementLines } from "@/db/schema";
-import { isDuplicateKey, type Transaction } from "@/db/transaction";
+import { bins, grades } from "@/db/schema";
+import { databaseErrorNumber, isDuplicateKey, type Transaction } from "@/db/transaction";
 import { isZero } from "@/lib/arithmetic/decimal";
 import type { Context } from "@/lib/auth/context";
 import { openBooks } from "@/lib/books/books";
@@ -60,14 +60,17 @@ export async function addBin(ctx: Context, input: BinInput): Promise<Bin> {
   });
 }
 
-/** The grade of a bin is part of every line booked for it. Throws `conflict` once anything was. */
-async function requireNeverUsed(tx: Transaction, ctx: Context, bin: Bin): Promise<void> {
-  const [line] = await tx
-    .select({ line: movementLines.line })
-    .from(movementLines)
-    .where(and(eq(movementLines.outfitId, ctx.outfit.id), eq(movementLines.binId, bin.id)))
-    .limit(1);
-  if (line) throw new AppError("conflict", `${bin.label} has held ${bin.gradeName}. Add another bin for the other grade.`);
+/** MariaDB's number for a change of a key that rows elsewhere point at. */
+const STILL_POINTED_AT = 1451;
+
+/**
+ * Why the database did not take a change. Every line, weigh-in, count and ticket that names a bin names its grade with it, so the keys
+ * themselves keep the grade of a bin that was used, also one that a draft ticket names at this moment.
+ */
+function whyNotChanged(error: unknown, bin: Bin, label: string): unknown {
+  if (databaseErrorNumber(error) !== STILL_POINTED_AT) return labelTaken(error, label);
+  const message = `${bin.label} was used for ${bin.gradeName}. Add another bin for the other grade.`;
+  return new AppError("conflict", message, { errors: [{ path: "gradeId", message }], cause: error });
 }
 
 /** Changes a bin. Throws `stale` when somebody changed it first, `conflict` for what its contents do not allow. */
@@ -78,10 +81,7 @@ export async function changeBin(ctx: Context, id: string, change: BinChange): Pr
     const before = await requireBin(tx, ctx, id);
     if (before.version !== ctx.ifMatch) throw new AppError("stale", `${before.label} was changed since you opened it. Look at it again.`, { current: before });
     const { putAway, gradeId, ...words } = change;
-    if (gradeId !== undefined && gradeId !== before.gradeId) {
-      await requireGradeHere(tx, ctx, gradeId);
-      await requireNeverUsed(tx, ctx, before);
-    }
+    if (gradeId !== undefined) await requireGradeHere(tx, ctx, gradeId);
     if (putAway && !isZero(before.balance)) {
       throw new AppError("conflict", `${before.label} still holds ${before.balance} ${ctx.outfit.weightUnit}. Sell it or count it to 0 first.`);
     }
@@ -92,7 +92,7 @@ export async function changeBin(ctx: Context, id: string, change: BinChange): Pr
         .set({ ...words, ...(gradeId === undefined ? {} : { gradeId }), ...putAwayAt, version: before.version + 1 })
         .where(and(eq(bins.outfitId, ctx.outfit.id), eq(bins.id, id)));
     } catch (error) {
-      throw labelTaken(error, change.label ?? before.label);
+      throw whyNotChanged(error, before, change.label ?? before.label);
     }
     await audit(tx, ctx, "change-bin", { type: "bin", id }, { before, change });
     return requireBin(tx, ctx, id);

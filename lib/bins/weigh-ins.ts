@@ -10,9 +10,10 @@ import { audit, transact } from "@/lib/books/transact";
 import { AppError, fieldError, notFound } from "@/lib/http/errors";
 import { newId } from "@/lib/ids";
 import { reopenPickup } from "@/lib/pickups/service";
-import { getBin, getWeighIn, listWeighIns, openLots, pickupsDrawnBy } from "./queries";
-import { drawProblems, weighed, weighInBooking, type Lot, type TypedDraw } from "./rules";
-import type { Bin, WeighIn, WeighInInput, WeighInListQuery } from "./schema";
+import { getWeighIn, listWeighIns, openLots, pickupsDrawnBy } from "./queries";
+import { requireBinInUse } from "./in-use";
+import { drawProblems, fitsTheBook, weighed, weighInBooking, type Lot, type TypedDraw } from "./rules";
+import type { WeighIn, WeighInInput, WeighInListQuery } from "./schema";
 
 /** A page of weigh-ins, newest first. */
 export const seeWeighIns = (ctx: Context, query: WeighInListQuery) => listWeighIns(database(), { outfitId: ctx.outfit.id, ...query });
@@ -41,13 +42,6 @@ function requireDraws(input: WeighInInput): TypedDraw[] {
   return draws;
 }
 
-async function requireBinInUse(books: Books, binId: string): Promise<Bin> {
-  const bin = await getBin(books.tx, { outfitId: books.ctx.outfit.id, id: binId });
-  if (!bin) throw fieldError("binId", "There is no such bin here.");
-  if (bin.putAwayAt !== null) throw new AppError("conflict", `${bin.label} is put away. Take it into use again first.`);
-  return bin;
-}
-
 /** The lots that the net is drawn from, or null for metal from outside. */
 async function lotsFor(books: Books, input: WeighInInput): Promise<Lot[] | null> {
   const { id: outfitId } = books.ctx.outfit;
@@ -65,7 +59,7 @@ async function lotsFor(books: Books, input: WeighInInput): Promise<Lot[] | null>
 }
 
 /**
- * Puts weighed metal into a bin. Throws `input` for draws that put nothing in or a day that lies ahead, `conflict` for a bin put away or a pickup
+ * Puts weighed metal into a bin. Throws `input` for draws that put nothing in or too much, or a day that lies ahead, `conflict` for a bin put away or a pickup
  * that is not open, `books-refuse` for a closed month.
  */
 export async function weighIn(ctx: Context, input: WeighInInput): Promise<WeighIn> {
@@ -73,6 +67,9 @@ export async function weighIn(ctx: Context, input: WeighInInput): Promise<WeighI
   const draws = requireDraws(input);
   const unit = input.unit ?? ctx.outfit.weightUnit;
   const { gross, tare, net } = weighed(draws, unit, ctx.outfit.weightUnit);
+  if (!fitsTheBook(gross)) {
+    throw fieldError(input.draws === undefined ? "gross" : "draws", `Gross must be less than ten million ${ctx.outfit.weightUnit}. Look at the unit.`);
+  }
   if (compare(net, "0") <= 0) throw fieldError("gross", "That is too little to weigh in this unit.");
   return transact(ctx, async (tx) => {
     const books = await openBooks(tx, ctx);
