@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { addDraw, drawsOf, fieldOf, readDraws } from "./typed-draws";
+import { addDraw, drawsOf, fieldOf, readDraws, typedTare } from "./typed-draws";
 
 describe("weights typed at the bench", () => {
   it("a comma decimal is read as a decimal, not as ten times the weight", () => {
@@ -23,6 +23,10 @@ describe("weights typed at the bench", () => {
 
   it("text that is no weight is sent as it is, so that the check can name the field", () => {
     expect(drawsOf([{ gross: "abc", tare: "" }], "lb")).toEqual({ gross: "abc", tare: "0" });
+  });
+
+  it("a bin's tare is typed to the last decimal, so that it is the one that is booked", () => {
+    expect(["0", "4.5", "1.8500", "1.8567", "1250"].map(typedTare)).toEqual(["0.00", "4.50", "1.85", "1.8567", "1250.00"]);
   });
 
   it("no draw is put under one that puts nothing in", () => {

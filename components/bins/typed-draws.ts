@@ -1,4 +1,4 @@
-import { isPositive, subtract, sum } from "@/lib/arithmetic/decimal";
+import { compare, fixed, isPositive, subtract, sum, trim } from "@/lib/arithmetic/decimal";
 import { readNumber } from "@/lib/arithmetic/read-number";
 
 /** A container on the scale as it is typed. */
@@ -17,6 +17,12 @@ export function readDraws(draws: TypedDraw[], unit: string): { net: string | nul
     return gross === null || tare === null ? [] : [subtract(gross, tare)];
   });
   return { net: nets.length === 0 ? null : sum(nets) };
+}
+
+/** A bin's tare as it is typed for the person: two decimals as on the scale, more only where the tare has more, because what stands here is booked. */
+export function typedTare(tare: string): string {
+  const shown = fixed(tare, 2);
+  return compare(shown, tare) === 0 ? shown : trim(tare);
 }
 
 /** A new draw under the others, unless the last one puts nothing in yet. */

@@ -19,7 +19,7 @@ import { DrawList } from "./draw-list";
 import { GradePicker, type GradeChoice } from "./grade-picker";
 import { SourcePicker, type LotChoice, type Source } from "./source-picker";
 import { TodaysWeighIns } from "./todays-weigh-ins";
-import { addDraw, drawsOf, fieldOf, readDraws, type TypedDraw } from "./typed-draws";
+import { addDraw, drawsOf, fieldOf, readDraws, typedTare, type TypedDraw } from "./typed-draws";
 import { useWakeLock } from "./use-wake-lock";
 
 type Props = {
@@ -35,8 +35,6 @@ type Props = {
   presetBin: string | null;
 };
 
-const shownTare = (tare: string) => formatWeight(tare, { places: 2 }).replaceAll(",", "");
-
 const booked = ({ net, binLabel, binBalance }: WeighIn, unit: string) =>
   `${formatWeight(net, { places: 2 })} ${unit} in ${binLabel}, which holds ${formatWeight(binBalance)} ${unit}.`;
 
@@ -48,7 +46,7 @@ export function WeighInForm(props: Props) {
   const firstBin = screen.bins.find((bin) => bin.id === props.presetBin) ?? screen.bins.find((bin) => bin.gradeId === screen.grades[0]?.id);
   const [gradeId, setGradeId] = useState(firstBin?.gradeId ?? "");
   const [binId, setBinId] = useState(firstBin?.id ?? "");
-  const [draws, setDraws] = useState<TypedDraw[]>([{ gross: "", tare: shownTare(firstBin?.tare ?? "0") }]);
+  const [draws, setDraws] = useState<TypedDraw[]>([{ gross: "", tare: typedTare(firstBin?.tare ?? "0") }]);
   const [source, setSource] = useState<Source>(props.presetPickup ? { from: "pickup", lot: props.presetPickup } : { from: "outside" });
   const [made, setMade] = useState<WeighIn | null>(null);
   useWakeLock();
@@ -60,14 +58,14 @@ export function WeighInForm(props: Props) {
     send: (input, idempotencyKey) => apiSend(`/api/o/${slug}/weigh-ins`, { body: input, idempotencyKey }),
     onDone: (weighIn) => {
       setMade(weighIn);
-      setDraws([{ gross: "", tare: shownTare(bin?.tare ?? "0") }]);
+      setDraws([{ gross: "", tare: typedTare(bin?.tare ?? "0") }]);
       grossRef.current?.focus();
       router.refresh();
     },
   });
   const chooseBin = (next: Bin | undefined) => {
     setBinId(next?.id ?? "");
-    setDraws([...draws.slice(0, -1), { gross: last.gross, tare: shownTare(next?.tare ?? "0") }]);
+    setDraws([...draws.slice(0, -1), { gross: last.gross, tare: typedTare(next?.tare ?? "0") }]);
   };
   const chooseGrade = (id: string) => {
     setGradeId(id);
@@ -129,7 +127,7 @@ export function WeighInForm(props: Props) {
           unit={unit}
           errorOf={(index) => messageAt(`draw-${index}`)}
           onAdd={() => {
-            setDraws(addDraw(draws, shownTare(bin?.tare ?? "0"), unit));
+            setDraws(addDraw(draws, typedTare(bin?.tare ?? "0"), unit));
             grossRef.current?.focus();
           }}
           onRemove={(index) => {

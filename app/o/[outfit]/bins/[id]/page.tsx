@@ -29,7 +29,7 @@ export default async function BinPage({ params }: { params: Promise<{ outfit: st
           Movements
         </Button>
       ) : null}
-      {can(role, "counts.make") ? (
+      {can(role, "counts.make") && bin.putAwayAt === null ? (
         <Button variant="line" href={`/o/${slug}/bins/count?bin=${bin.id}`}>
           Count
         </Button>
